@@ -1,0 +1,132 @@
+package gapwright.model.quantity;
+
+import java.math.BigDecimal;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+
+/**
+ * A physical quantity as somebody typed it, magnitude and unit, with its SI value derived. Immutable; two are equal
+ * when their texts and dimensions are, so that nothing of what was typed is lost on a round trip.
+ */
+public final class Quantity {
+
+	private static final Pattern NUMBER_AND_UNIT = Pattern
+			.compile("([+-]?(?:\\d+\\.?\\d*|\\.\\d+)(?:[eE][+-]?\\d{1,3})?)\\s*(.*)");
+	private static final Pattern GAUGE = Pattern.compile("AWG\\s*(-?\\d{1,3})", Pattern.CASE_INSENSITIVE);
+	private static final Pattern COMMA = Pattern.compile("[+-]?\\d+,\\d+.*");
+	private static final int FINEST_GAUGE = 56;
+	private static final int COARSEST_GAUGE = -3;
+
+	private final String text;
+	private final Dimension dimension;
+	private final double si;
+
+	private Quantity(String text, Dimension dimension, double si) {
+		this.text = text;
+		this.dimension = dimension;
+		this.si = si;
+	}
+
+	/**
+	 * Reads a quantity. A point separates decimals; the unit is never left out; blanks between them are optional.
+	 *
+	 * @param text     for example "0.5 mm", "20mil", "1.2 cm²", "100 °C"; "AWG 18" where a wire is asked for
+	 * @param expected what it must measure
+	 * @throws QuantityFormatException saying what was found, why it will not do, and an example of what would
+	 */
+	public static Quantity parse(String text, Dimension expected) {
+		String typed = text.strip();
+		if (typed.isEmpty()) {
+			throw new QuantityFormatException(text, "empty, expected " + expected.noun(), "e.g. " + expected.example());
+		}
+		if (expected == Dimension.WIRE) {
+			Matcher gauge = GAUGE.matcher(typed);
+			if (gauge.matches()) {
+				return new Quantity(typed, expected, diameter(typed, Integer.parseInt(gauge.group(1))));
+			}
+		}
+		Matcher parts = NUMBER_AND_UNIT.matcher(typed);
+		if (COMMA.matcher(typed).matches()) {
+			throw new QuantityFormatException(text, "a comma is not read in numbers",
+					"write a decimal point, e.g. " + expected.example());
+		}
+		if (!parts.matches()) {
+			throw new QuantityFormatException(text, "not a number with a unit", "e.g. " + expected.example());
+		}
+		if (parts.group(2).isEmpty()) {
+			throw new QuantityFormatException(text, expected.noun() + " needs a unit", "e.g. " + expected.example());
+		}
+		Units.Unit unit = Units.find(parts.group(2));
+		if (unit == null) {
+			throw new QuantityFormatException(text, "unknown unit '" + parts.group(2) + "'",
+					"expected " + expected.noun() + ", e.g. " + expected.example());
+		}
+		Dimension needed = expected == Dimension.WIRE ? Dimension.LENGTH : expected;
+		if (unit.dimension() != needed) {
+			throw new QuantityFormatException(text, "that is " + unit.dimension().noun(),
+					"expected " + expected.noun() + ", e.g. " + expected.example());
+		}
+		BigDecimal magnitude = new BigDecimal(parts.group(1));
+		double si = magnitude.add(unit.offset()).multiply(unit.factor()).doubleValue();
+		if (Double.isInfinite(si)) {
+			throw new QuantityFormatException(text, "out of the range of numbers", "e.g. " + expected.example());
+		}
+		return new Quantity(typed, expected, si);
+	}
+
+	/**
+	 * @param magnitude finite; written in its shortest decimal form without an exponent
+	 * @param unit      for example "mm"
+	 */
+	public static Quantity of(double magnitude, String unit, Dimension dimension) {
+		if (!Double.isFinite(magnitude)) {
+			throw new QuantityFormatException(magnitude + " " + unit, "not a number", "");
+		}
+		BigDecimal decimal = new BigDecimal(Double.toString(magnitude)).stripTrailingZeros();
+		return parse(decimal.toPlainString() + " " + unit, dimension);
+	}
+
+	/** Bare diameter of an AWG size, m. Source: ASTM B258, d = 0.005 in · 92^((36 − n)/39); from memory. */
+	private static double diameter(String text, int gauge) {
+		if (gauge < COARSEST_GAUGE || gauge > FINEST_GAUGE) {
+			throw new QuantityFormatException(text, "no such wire gauge",
+					"AWG " + COARSEST_GAUGE + " (4/0) to AWG " + FINEST_GAUGE);
+		}
+		return 0.005 * 0.0254 * Math.pow(92, (36 - gauge) / 39.0);
+	}
+
+	/** @return magnitude and unit exactly as typed */
+	public String text() {
+		return text;
+	}
+
+	public Dimension dimension() {
+		return dimension;
+	}
+
+	/** @return value in {@link Dimension#unit()}, correctly rounded */
+	public double si() {
+		return si;
+	}
+
+	/** @return the unit as typed, "" for a wire gauge */
+	public String unit() {
+		Matcher parts = NUMBER_AND_UNIT.matcher(text);
+		return parts.matches() ? parts.group(2) : "";
+	}
+
+	@Override
+	public boolean equals(Object other) {
+		return other instanceof Quantity quantity && quantity.dimension == dimension && quantity.text.equals(text);
+	}
+
+	@Override
+	public int hashCode() {
+		return text.hashCode();
+	}
+
+	@Override
+	public String toString() {
+		return text;
+	}
+}
