@@ -1,0 +1,68 @@
+package gapwright.physics.network;
+
+import gapwright.physics.material.BhCurve;
+
+/**
+ * One leg under an imposed MMF f: finds H of H·l + R·A·B(H) = f, hence flux and its derivative. The left side rises
+ * with H, and for the concave curves Newton from below never leaves its bracket; tables fall back on halving.
+ */
+final class LegKernel {
+
+	/** More than enough for halving alone to reach rounding from any bracket. */
+	private static final int MOST_STEPS = 1100;
+	/** Floor of dB/dH in the Jacobian as a fraction of µ₀: the end of a table may come out flat. */
+	private static final double LEAST_SLOPE = 1e-3 * BhCurve.MU_0;
+
+	private LegKernel() {
+	}
+
+	/**
+	 * @param f        A
+	 * @param guess    A/m, any
+	 * @param length   m, ≥ 0
+	 * @param reactive R·A, m²/H, ≥ 0; not 0 when length is
+	 * @return H, A/m
+	 */
+	static double fieldStrength(BhCurve curve, double f, double guess, double length, double reactive) {
+		if (f == 0) {
+			return 0;
+		}
+		if (length == 0) {
+			return curve.fieldStrength(f / reactive);
+		}
+		double target = Math.abs(f);
+		double high = target / length;
+		if (reactive == 0) {
+			return Math.copySign(high, f);
+		}
+		double low = 0;
+		double h = Math.copySign(1, guess) == Math.copySign(1, f) ? Math.min(Math.abs(guess), high) : 0;
+		for (int i = 0; i < MOST_STEPS; i++) {
+			double defect = h * length + reactive * curve.fluxDensity(h) - target;
+			if (defect == 0) {
+				break;
+			}
+			if (defect > 0) {
+				high = h;
+			} else {
+				low = h;
+			}
+			double next = h - defect / (length + reactive * curve.slope(h));
+			if (!(next >= low && next <= high)) {
+				next = low + 0.5 * (high - low);
+			}
+			double moved = Math.abs(next - h);
+			h = next;
+			if (moved <= 2 * Math.ulp(h)) {
+				break;
+			}
+		}
+		return Math.copySign(h, f);
+	}
+
+	/** @return dφ/df, H: A·B′/(l + R·A·B′) */
+	static double conductance(double slope, double length, double area, double reluctance) {
+		double floored = Math.max(slope, LEAST_SLOPE);
+		return area * floored / (length + reluctance * area * floored);
+	}
+}
