@@ -6,12 +6,12 @@ public final class QuantityFormatException extends IllegalArgumentException {
 	private static final long serialVersionUID = 1L;
 
 	private final String found;
-	private final String expected;
+	private final String problem;
 
 	QuantityFormatException(String found, String problem, String expected) {
 		super("'" + found + "': " + problem + (expected.isEmpty() ? "" : ", " + expected));
 		this.found = found;
-		this.expected = expected;
+		this.problem = problem + (expected.isEmpty() ? "" : ", " + expected);
 	}
 
 	/** @return the text as typed */
@@ -19,8 +19,8 @@ public final class QuantityFormatException extends IllegalArgumentException {
 		return found;
 	}
 
-	/** @return what would do, for example "e.g. 0.5 mm" */
-	public String expected() {
-		return expected;
+	/** @return what is wrong and what would do, for example "a length needs a unit, e.g. 0.5 mm" */
+	public String problem() {
+		return problem;
 	}
 }

@@ -1,0 +1,312 @@
+package gapwright.model;
+
+import java.io.ByteArrayInputStream;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Set;
+
+import javax.xml.stream.XMLInputFactory;
+import javax.xml.stream.XMLStreamConstants;
+import javax.xml.stream.XMLStreamException;
+import javax.xml.stream.XMLStreamReader;
+
+import org.eclipse.emf.ecore.EAttribute;
+import org.eclipse.emf.ecore.EClass;
+import org.eclipse.emf.ecore.EClassifier;
+import org.eclipse.emf.ecore.EReference;
+import org.eclipse.emf.ecore.EStructuralFeature;
+
+/**
+ * Checks a whole file against the model before EMF builds one object of it, so that every problem is found with its
+ * line and said in the user's words, and nothing is ever half loaded. Streams; follows no reference out of the file.
+ */
+final class FileChecker {
+
+	private static final String XMI = "http://www.omg.org/XMI";
+	private static final String XSI = "http://www.w3.org/2001/XMLSchema-instance";
+	private static final String FAMILY = "urn:gapwright:design:";
+	/** A file with more wrong than this is no design; the rest would only hide the cause. */
+	private static final int MOST_PROBLEMS = 100;
+
+	/** An open element: what it is, and which single children it has had. */
+	private record Frame(EClass type, String name, Set<String> singles) {
+	}
+
+	private record Reference(String element, EReference feature, String id, int line) {
+	}
+
+	private record Known(EClass type, int line) {
+	}
+
+	private final String file;
+	private final List<ReadProblem> problems = new ArrayList<>();
+	private final Map<String, Known> known = new HashMap<>();
+	private final List<Reference> references = new ArrayList<>();
+	private final Deque<Frame> open = new ArrayDeque<>();
+
+	private FileChecker(String file) {
+		this.file = file;
+	}
+
+	/** @return what is wrong; empty when EMF can load it */
+	static List<ReadProblem> check(String file, byte[] content) {
+		FileChecker checker = new FileChecker(file);
+		if (content.length == 0) {
+			checker.add(0, "", "", "", "the file is empty, expected a design");
+		} else {
+			checker.read(content);
+		}
+		return checker.problems;
+	}
+
+	private void read(byte[] content) {
+		XMLInputFactory factory = XMLInputFactory.newDefaultFactory();
+		factory.setProperty(XMLInputFactory.IS_NAMESPACE_AWARE, true);
+		factory.setProperty(XMLInputFactory.IS_SUPPORTING_EXTERNAL_ENTITIES, false);
+		factory.setProperty(XMLInputFactory.SUPPORT_DTD, false);
+		factory.setXMLResolver((publicId, systemId, base, namespace) -> new ByteArrayInputStream(new byte[0]));
+		try {
+			XMLStreamReader xml = factory.createXMLStreamReader(new ByteArrayInputStream(content));
+			while (xml.hasNext() && problems.size() < MOST_PROBLEMS) {
+				if (!event(xml, xml.next())) {
+					return;
+				}
+			}
+		} catch (XMLStreamException e) {
+			int line = e.getLocation() == null ? 0 : Math.max(0, e.getLocation().getLineNumber());
+			add(line, "", "", "", "truncated or malformed XML: " + plain(e.getMessage()));
+			return;
+		} catch (RuntimeException e) {
+			// the parser's own failure on bytes that are no text
+			add(0, "", "", "", "not readable as XML: " + plain(String.valueOf(e.getMessage())));
+			return;
+		}
+		resolve();
+	}
+
+	/** @return whether to read on */
+	private boolean event(XMLStreamReader xml, int event) {
+		int line = xml.getLocation().getLineNumber();
+		switch (event) {
+		case XMLStreamConstants.START_ELEMENT:
+			return open.isEmpty() ? root(xml, line) : child(xml, line);
+		case XMLStreamConstants.END_ELEMENT:
+			open.pop();
+			return true;
+		case XMLStreamConstants.DTD:
+		case XMLStreamConstants.ENTITY_REFERENCE:
+			add(line, "", "", "", "a document type declaration or entity is not allowed in a design");
+			return false;
+		case XMLStreamConstants.CHARACTERS:
+			if (!xml.isWhiteSpace()) {
+				add(line, open.peek().name(), "", clip(xml.getText()), "text between elements is not allowed");
+			}
+			return true;
+		default:
+			return true;
+		}
+	}
+
+	private boolean root(XMLStreamReader xml, int line) {
+		String namespace = xml.getNamespaceURI() == null ? "" : xml.getNamespaceURI();
+		if (!namespace.equals(GapwrightPackage.eNS_URI)) {
+			boolean ours = namespace.startsWith(FAMILY);
+			add(line, "", "", ours ? namespace : xml.getLocalName(), ours
+					? "written by another version of the format, this program reads " + GapwrightPackage.eNS_URI
+							+ "; update it to open the file"
+					: "not a Gapwright design, expected a root element gapwright:Design in the namespace "
+							+ GapwrightPackage.eNS_URI);
+			return false;
+		}
+		if (!xml.getLocalName().equals("Design")) {
+			add(line, "", "", xml.getLocalName(), "expected the root element Design");
+			return false;
+		}
+		enter(xml, GapwrightPackage.Literals.DESIGN, line);
+		return true;
+	}
+
+	private boolean child(XMLStreamReader xml, int line) {
+		Frame parent = open.peek();
+		String tag = xml.getLocalName();
+		EStructuralFeature feature = parent.type().getEStructuralFeature(tag);
+		if (!(feature instanceof EReference reference) || !reference.isContainment()) {
+			add(line, parent.name(), "", tag, feature == null
+					? "no such element in " + article(parent.type()) + ", allowed are " + children(parent.type())
+					: "must be written as an attribute");
+			return skip(xml);
+		}
+		if (!feature.isMany() && !parent.singles().add(tag)) {
+			add(line, parent.name(), "", tag, "given twice, allowed once");
+		}
+		EClass type = typeOf(xml, reference, line);
+		if (type == null) {
+			return skip(xml);
+		}
+		enter(xml, type, line);
+		return true;
+	}
+
+	private EClass typeOf(XMLStreamReader xml, EReference reference, int line) {
+		EClass expected = reference.getEReferenceType();
+		String given = xml.getAttributeValue(XSI, "type");
+		if (given == null) {
+			if (!expected.isAbstract()) {
+				return expected;
+			}
+			add(line, open.peek().name(), "xsi:type", "", "missing, allowed are " + concrete(expected));
+			return null;
+		}
+		String name = given.substring(given.indexOf(':') + 1);
+		String prefix = given.contains(":") ? given.substring(0, given.indexOf(':')) : "";
+		boolean ours = GapwrightPackage.eNS_URI.equals(xml.getNamespaceContext().getNamespaceURI(prefix));
+		EClassifier found = ours ? GapwrightPackage.eINSTANCE.getEClassifier(name) : null;
+		if (found instanceof EClass type && !type.isAbstract() && expected.isSuperTypeOf(type)) {
+			return type;
+		}
+		add(line, open.peek().name(), "xsi:type", given, "no such " + words(reference.getName()) + ", allowed are "
+				+ concrete(expected));
+		return null;
+	}
+
+	private void enter(XMLStreamReader xml, EClass type, int line) {
+		String id = xml.getAttributeValue(null, "id");
+		boolean hasId = GapwrightPackage.Literals.ELEMENT.isSuperTypeOf(type);
+		String name = hasId && id != null && !id.isBlank() ? id : nameless(type);
+		if (hasId) {
+			identify(type, id, name, line);
+		}
+		for (int i = 0; i < xml.getAttributeCount(); i++) {
+			String namespace = xml.getAttributeNamespace(i);
+			if (XSI.equals(namespace) || XMI.equals(namespace) && xml.getAttributeLocalName(i).equals("version")) {
+				continue;
+			}
+			attribute(type, name, xml.getAttributeLocalName(i), xml.getAttributeValue(i),
+					namespace == null || namespace.isEmpty(), line);
+		}
+		open.push(new Frame(type, name, new HashSet<>()));
+	}
+
+	/** Plain values have no id; the message names them with the element they belong to. */
+	private String nameless(EClass type) {
+		String own = type == GapwrightPackage.Literals.DESIGN ? "Design" : type.getName();
+		return open.isEmpty() ? own : open.peek().name() + "/" + own;
+	}
+
+	private void identify(EClass type, String id, String name, int line) {
+		if (id == null || id.isBlank()) {
+			add(line, name, "id", id == null ? "" : id, "an id is needed, short and unique in the design");
+			return;
+		}
+		if (id.chars().anyMatch(Character::isWhitespace) || id.contains("#") || id.startsWith("/")) {
+			add(line, name, "id", id, "an id must not contain blanks or #, nor begin with /");
+		}
+		Known before = known.putIfAbsent(id, new Known(type, line));
+		if (before != null) {
+			add(line, name, "id", id, "given twice, also to " + article(before.type()) + " in line " + before.line());
+		}
+	}
+
+	private void attribute(EClass type, String element, String name, String value, boolean plainName, int line) {
+		if (name.equals("href")) {
+			add(line, element, name, clip(value), "a design must not refer to other files");
+			return;
+		}
+		EStructuralFeature feature = plainName ? type.getEStructuralFeature(name) : null;
+		if (feature instanceof EReference reference && !reference.isContainment()) {
+			references.add(new Reference(element, reference, value, line));
+		} else if (feature instanceof EAttribute attribute) {
+			String expected = AttributeText.problem(attribute, value);
+			if (expected != null) {
+				add(line, element, name, clip(value), expected);
+			}
+		} else {
+			add(line, element, name, clip(value),
+					"no such attribute in " + article(type) + ", allowed are " + attributes(type));
+		}
+	}
+
+	private void resolve() {
+		for (Reference reference : references) {
+			EClass expected = reference.feature().getEReferenceType();
+			Known target = known.get(reference.id());
+			if (target == null) {
+				add(reference.line(), reference.element(), reference.feature().getName(), clip(reference.id()),
+						"there is no " + words(expected.getName()) + " with this id" + (reference.id().contains("#")
+								? "; a design must not refer to other files"
+								: ""));
+			} else if (!expected.isSuperTypeOf(target.type())) {
+				add(reference.line(), reference.element(), reference.feature().getName(), reference.id(),
+						"that is " + article(target.type()) + ", expected " + article(expected));
+			}
+		}
+	}
+
+	/** Passes over an element that has been reported, with all below it. */
+	private boolean skip(XMLStreamReader xml) {
+		try {
+			int depth = 1;
+			while (depth > 0 && xml.hasNext()) {
+				int event = xml.next();
+				depth += event == XMLStreamConstants.START_ELEMENT ? 1
+						: event == XMLStreamConstants.END_ELEMENT ? -1 : 0;
+			}
+			return true;
+		} catch (XMLStreamException e) {
+			add(e.getLocation().getLineNumber(), "", "", "", "truncated or malformed XML: " + plain(e.getMessage()));
+			return false;
+		}
+	}
+
+	private void add(int line, String element, String attribute, String found, String expected) {
+		if (problems.size() < MOST_PROBLEMS) {
+			problems.add(new ReadProblem(file, line, element, attribute, found, expected));
+		}
+	}
+
+	private static String plain(String message) {
+		int at = message.indexOf("Message: ");
+		return clip((at < 0 ? message : message.substring(at + 9)).strip());
+	}
+
+	private static String clip(String text) {
+		String oneLine = text.strip().replaceAll("\\s+", " ");
+		return oneLine.length() > 200 ? oneLine.substring(0, 200) + "…" : oneLine;
+	}
+
+	private static String article(EClass type) {
+		String words = words(type.getName());
+		return ("aeiou".indexOf(words.charAt(0)) >= 0 ? "an " : "a ") + words;
+	}
+
+	/** "OperatingPoint" becomes "operating point". */
+	private static String words(String name) {
+		return name.replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
+	}
+
+	private static String concrete(EClass type) {
+		List<String> names = new ArrayList<>();
+		for (EClassifier classifier : GapwrightPackage.eINSTANCE.getEClassifiers()) {
+			if (classifier instanceof EClass each && !each.isAbstract() && type.isSuperTypeOf(each)) {
+				names.add("gapwright:" + each.getName());
+			}
+		}
+		return String.join(", ", names);
+	}
+
+	private static String attributes(EClass type) {
+		return String.join(", ", type.getEAllStructuralFeatures().stream()
+				.filter(f -> !(f instanceof EReference r) || !r.isContainment()).map(f -> f.getName()).toList());
+	}
+
+	private static String children(EClass type) {
+		List<String> names = type.getEAllContainments().stream().map(f -> f.getName()).toList();
+		return names.isEmpty() ? "none" : String.join(", ", names);
+	}
+}
