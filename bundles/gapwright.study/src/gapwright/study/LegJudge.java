@@ -1,0 +1,69 @@
+package gapwright.study;
+
+import gapwright.model.check.Severity;
+import gapwright.physics.material.TableBh;
+import gapwright.physics.network.Solution;
+
+/** Judges legs against the saturation of their material at an operating point's temperature. */
+final class LegJudge {
+
+	/** Slope of a table's last piece over µ₀ above which its end is no saturation yet. */
+	private static final double NOT_SATURATED = 20;
+
+	private final StudyInput input;
+	private final StudyInput.PointData point;
+	private final Findings findings;
+
+	LegJudge(StudyInput input, StudyInput.PointData point, Findings findings) {
+		this.input = input;
+		this.point = point;
+		this.findings = findings;
+	}
+
+	LegResult judge(int k, Solution s, double peak) {
+		StudyInput.LegData leg = input.legs.get(k);
+		double saturation = leg.saturation().at(point.celsius());
+		double utilisation = peak / saturation;
+		LegState state = Double.isNaN(utilisation) ? LegState.UNKNOWN
+				: utilisation >= 1 ? LegState.OVER : utilisation >= input.nearFraction ? LegState.NEAR : LegState.WITHIN;
+		if (state == LegState.OVER) {
+			add(Severity.ERROR, Findings.OVER, leg.id(), reached(peak, utilisation, saturation)
+					+ ": the leg is saturated", "Widen the leg or its gap, use fewer turns, or lower the current.");
+		} else if (state == LegState.NEAR) {
+			add(Severity.WARNING, Findings.NEAR, leg.id(), reached(peak, utilisation, saturation) + ", near is from "
+					+ Figures.perCent(input.nearFraction), "");
+		}
+		if (leg.saturation().isOutside(point.celsius())) {
+			add(Severity.NOTE, "temperature-outside-data", leg.id(),
+					"saturation of '" + leg.material() + "' is given from " + leg.saturation().range()
+							+ "; its end value is used at " + Figures.of(point.celsius()) + " °C",
+					"Add a saturation at this temperature.");
+		}
+		if (input.network.curve(k) instanceof TableBh table) {
+			tableEnd(table, leg, peak);
+		}
+		return new LegResult(leg.id(), s.legFlux()[k], s.legFluxDensity()[k], s.legFieldStrength()[k],
+				s.legMmfDrop()[k], saturation, peak, utilisation, state);
+	}
+
+	private String reached(double peak, double utilisation, double saturation) {
+		return "peak flux density " + Figures.of(peak) + " T is " + Figures.perCent(utilisation) + " of "
+				+ Figures.of(saturation) + " T at " + Figures.of(point.celsius()) + " °C";
+	}
+
+	private void tableEnd(TableBh table, StudyInput.LegData leg, double peak) {
+		int last = table.size() - 1;
+		double secant = (table.fluxDensityAt(last) - table.fluxDensityAt(last - 1))
+				/ (table.fieldStrengthAt(last) - table.fieldStrengthAt(last - 1));
+		if (peak > table.fluxDensityAt(last) && secant > NOT_SATURATED * TableBh.MU_0) {
+			add(Severity.NOTE, "table-end-not-saturated", leg.id(),
+					"the flux density lies beyond the last point of the table, which still rises steeply there;"
+							+ " beyond it the flux density reads low",
+					"Add points nearer to saturation.");
+		}
+	}
+
+	private void add(Severity severity, String code, String subject, String message, String hint) {
+		findings.add(new Finding(severity, code, subject, point.id(), message, hint));
+	}
+}

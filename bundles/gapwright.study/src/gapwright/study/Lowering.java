@@ -1,0 +1,197 @@
+package gapwright.study;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+
+import org.eclipse.emf.ecore.EObject;
+
+import gapwright.model.AirPath;
+import gapwright.model.Coil;
+import gapwright.model.CurrentDrive;
+import gapwright.model.Design;
+import gapwright.model.Drive;
+import gapwright.model.Element;
+import gapwright.model.Joint;
+import gapwright.model.Leg;
+import gapwright.model.LegGeometry;
+import gapwright.model.Limits;
+import gapwright.model.Magnet;
+import gapwright.model.Material;
+import gapwright.model.OperatingPoint;
+import gapwright.model.VoltageDrive;
+import gapwright.model.Winding;
+import gapwright.model.check.DesignCheck;
+import gapwright.model.check.Problem;
+import gapwright.model.check.Severity;
+import gapwright.physics.material.BhCurve;
+import gapwright.physics.network.Network;
+
+/**
+ * Lowers a design to plain numbers. An element with an error takes its whole island out of the network, because every
+ * flux there depends on it; other islands are computed all the same.
+ */
+public final class Lowering {
+
+	private static final double DEFAULT_NEAR = 0.8;
+
+	private final Design design;
+	private final Findings findings = new Findings();
+	private final Set<EObject> broken = new HashSet<>();
+	private final Map<Material, BhCurve> curves = new HashMap<>();
+	private final Network.Builder builder = Network.builder();
+	private final Map<Joint, Integer> joints = new HashMap<>();
+	private final Map<Leg, Integer> legIndex = new HashMap<>();
+	private final List<StudyInput.LegData> legs = new ArrayList<>();
+	private final List<StudyInput.GapData> gaps = new ArrayList<>();
+	private final List<String> airPaths = new ArrayList<>();
+	private final List<StudyInput.WindingData> windings = new ArrayList<>();
+	private final Map<Winding, Integer> windingIndex = new HashMap<>();
+
+	private Lowering(Design design) {
+		this.design = design;
+	}
+
+	/** Reads the design; to be called where it may be read, in a workbench the user interface's thread. */
+	public static StudyInput of(Design design) {
+		return new Lowering(design).lower();
+	}
+
+	private StudyInput lower() {
+		for (Problem problem : DesignCheck.check(design)) {
+			findings.add(new Finding(problem.severity(), problem.code(), problem.subject(), null, problem.message(),
+					problem.hint()));
+			if (problem.severity() == Severity.ERROR) {
+				markBroken(problem.element());
+			}
+		}
+		materials();
+		GapLowering gapLowering = new GapLowering(findings);
+		for (Leg leg : design.getLegs()) {
+			boolean unplaced = broken.contains(leg.getFrom()) || broken.contains(leg.getTo());
+			if (unplaced || broken.contains(leg.getMaterial()) || !gapLowering.read(leg)) {
+				broken.add(leg);
+			}
+		}
+		Islands islands = new Islands(design, broken);
+		for (Joint joint : design.getJoints()) {
+			joints.put(joint, builder.joint());
+		}
+		for (Leg leg : design.getLegs()) {
+			if (islands.isSound(leg.getFrom()) && islands.isSound(leg.getTo()) && !broken.contains(leg)) {
+				leg(leg, gapLowering);
+			}
+		}
+		for (AirPath path : design.getAirPaths()) {
+			if (islands.isSound(path.getFrom()) && islands.isSound(path.getTo()) && !broken.contains(path)) {
+				builder.airPath(joints.get(path.getFrom()), joints.get(path.getTo()), permeance(path));
+				airPaths.add(path.getId());
+			}
+		}
+		design.getWindings().forEach(this::winding);
+		Network network = builder.build();
+		new TopologyFindings(design, network, legIndex, joints, islands, findings).add();
+		Limits limits = design.getLimits();
+		double near = limits == null || broken.contains(limits) ? DEFAULT_NEAR : limits.getNearFraction();
+		List<StudyInput.PointData> points = new ArrayList<>();
+		for (OperatingPoint point : design.getOperatingPoints()) {
+			points.add(point(point));
+		}
+		return new StudyInput(design.getName() == null ? "" : design.getName(), near, network, legs, gaps, airPaths,
+				windings, points, findings.list());
+	}
+
+	/** A gap's error is its leg's, a curve's its material's; a coil is judged by its winding, a drive by its point. */
+	private void markBroken(EObject element) {
+		for (EObject object = element; object != null && object != design; object = object.eContainer()) {
+			broken.add(object);
+		}
+	}
+
+	private void materials() {
+		for (Material material : design.getMaterials()) {
+			if (broken.contains(material)) {
+				continue;
+			}
+			try {
+				BhCurve curve = MaterialLowering.curve(material.getCurve());
+				curves.put(material, curve);
+				MaterialFindings.add(material, curve, findings);
+			} catch (IllegalArgumentException e) {
+				findings.error("value-out-of-domain", id(material), e.getMessage(), "");
+				broken.add(material);
+			}
+		}
+	}
+
+	private void leg(Leg leg, GapLowering gapLowering) {
+		double gross = LegGeometry.grossArea(leg);
+		double reluctance = gapLowering.reluctance(leg);
+		double mmf = 0;
+		Magnet magnet = leg.getMagnet();
+		if (magnet != null) {
+			double perArea = magnet.getLength().si() / (BhCurve.MU_0 * magnet.getRecoilPermeability());
+			reluctance += perArea / gross;
+			mmf = (magnet.isReversed() ? -1 : 1) * magnet.getRemanence().si() * perArea;
+			findings.note("magnet-demagnetisation-unchecked", id(magnet),
+					"whether the field opposing the magnet demagnetises it is not checked: the material gives no knee",
+					"Check the maker's demagnetisation curve at the highest temperature.");
+		}
+		int index = builder.leg(joints.get(leg.getFrom()), joints.get(leg.getTo()), curves.get(leg.getMaterial()),
+				Math.max(0, LegGeometry.ironLength(leg)), gross * leg.getStackingFactor(), reluctance, mmf);
+		legIndex.put(leg, index);
+		legs.add(new StudyInput.LegData(id(leg), new SaturationData(leg.getMaterial()), id(leg.getMaterial())));
+		gaps.addAll(gapLowering.data(leg, index));
+	}
+
+	private static double permeance(AirPath path) {
+		return path.getPermeance() != null ? path.getPermeance().si()
+				: BhCurve.MU_0 * path.getArea().si() / path.getLength().si();
+	}
+
+	private void winding(Winding winding) {
+		if (winding.getCoils().isEmpty()) {
+			return;
+		}
+		int index = builder.winding();
+		windingIndex.put(winding, index);
+		boolean whole = !broken.contains(winding);
+		for (Coil coil : winding.getCoils()) {
+			Integer leg = legIndex.get(coil.getLeg());
+			if (leg == null || broken.contains(coil)) {
+				whole = false;
+			} else {
+				builder.coil(index, leg, coil.isReversed() ? -coil.getTurns() : coil.getTurns());
+			}
+		}
+		windings.add(new StudyInput.WindingData(id(winding), whole));
+	}
+
+	private StudyInput.PointData point(OperatingPoint point) {
+		double celsius = LegGeometry.si(point.getTemperature());
+		StudyInput.DriveData[] drives = new StudyInput.DriveData[windings.size()];
+		Arrays.fill(drives, StudyInput.DriveData.NONE);
+		boolean sound = !broken.contains(point) && legs.size() + airPaths.size() > 0;
+		for (Drive drive : point.getDrives()) {
+			Integer winding = windingIndex.get(drive.getWinding());
+			if (winding == null) {
+				sound &= drive.getWinding() != null && drive.getWinding().getCoils().isEmpty();
+			} else if (!broken.contains(drive) && drive instanceof CurrentDrive current) {
+				drives[winding] = new StudyInput.DriveData(current.getCurrent().si(), current.getRipple().si(), 0, false);
+			} else if (!broken.contains(drive) && drive instanceof VoltageDrive voltage) {
+				sound &= windings.get(winding).whole();
+				drives[winding] = new StudyInput.DriveData(voltage.getBias().si(), 0,
+						voltage.getVoltage().si() * voltage.getOnTime().si(), true);
+			}
+		}
+		return new StudyInput.PointData(id(point), celsius, sound ? List.of(drives) : null);
+	}
+
+	static String id(Element element) {
+		return element.getId() == null ? "" : element.getId();
+	}
+}
