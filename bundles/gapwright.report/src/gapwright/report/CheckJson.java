@@ -1,0 +1,129 @@
+package gapwright.report;
+
+import java.io.IOException;
+import java.io.StringWriter;
+import java.io.UncheckedIOException;
+import java.util.List;
+import java.util.Locale;
+
+import com.google.gson.stream.JsonWriter;
+
+import gapwright.study.AirPathResult;
+import gapwright.study.Finding;
+import gapwright.study.GapResult;
+import gapwright.study.LegResult;
+import gapwright.study.OperatingPointResult;
+import gapwright.study.StudyResult;
+import gapwright.study.WindingResult;
+
+/** The result of a check as one JSON object on one line: SI units, numbers with full precision, null for no number. */
+public final class CheckJson {
+
+	private final JsonWriter json;
+
+	private CheckJson(JsonWriter json) {
+		this.json = json;
+	}
+
+	/**
+	 * @param file    name of the design's file as given
+	 * @param version of the tool
+	 */
+	public static String of(StudyResult result, String file, String version) {
+		StringWriter text = new StringWriter();
+		try (JsonWriter json = new JsonWriter(text)) {
+			new CheckJson(json).write(result, file, version);
+		} catch (IOException e) {
+			throw new UncheckedIOException(e);
+		}
+		return text.toString();
+	}
+
+	private void write(StudyResult result, String file, String version) throws IOException {
+		json.beginObject();
+		json.name("tool").value("gapwright").name("version").value(version).name("file").value(file);
+		json.name("design").value(result.design()).name("worst").value(result.worst().word());
+		json.name("operatingPoints").beginArray();
+		for (OperatingPointResult point : result.operatingPoints()) {
+			operatingPoint(point);
+		}
+		json.endArray().name("findings").beginArray();
+		for (Finding finding : result.findings()) {
+			json.beginObject().name("severity").value(finding.severity().name().toLowerCase(Locale.ROOT));
+			json.name("code").value(finding.code()).name("subject").value(finding.subject());
+			json.name("operatingPoint").value(finding.operatingPoint());
+			json.name("message").value(finding.message()).name("hint").value(finding.hint()).endObject();
+		}
+		json.endArray().endObject();
+	}
+
+	private void operatingPoint(OperatingPointResult point) throws IOException {
+		json.beginObject().name("id").value(point.id()).name("converged").value(point.converged());
+		json.name("iterations").value(point.iterations());
+		number("fluxResidual", point.fluxResidual());
+		number("energy", point.energy());
+		number("coEnergy", point.coEnergy());
+		json.name("legs").beginArray();
+		for (LegResult leg : point.legs()) {
+			json.beginObject().name("id").value(leg.id());
+			number("flux", leg.flux());
+			number("fluxDensity", leg.fluxDensity());
+			number("fieldStrength", leg.fieldStrength());
+			number("mmfDrop", leg.mmfDrop());
+			number("saturation", leg.saturation());
+			number("peakFluxDensity", leg.peakFluxDensity());
+			number("utilisation", leg.utilisation());
+			json.name("state").value(leg.state().word()).endObject();
+		}
+		json.endArray().name("gaps").beginArray();
+		for (GapResult gap : point.gaps()) {
+			json.beginObject().name("id").value(gap.id()).name("leg").value(gap.leg());
+			number("permeance", gap.permeance());
+			number("fringingFactor", gap.fringingFactor());
+			number("mmfDrop", gap.mmfDrop());
+			json.endObject();
+		}
+		json.endArray().name("airPaths").beginArray();
+		for (AirPathResult path : point.airPaths()) {
+			json.beginObject().name("id").value(path.id());
+			number("flux", path.flux());
+			json.endObject();
+		}
+		json.endArray().name("windings").beginArray();
+		for (WindingResult winding : point.windings()) {
+			json.beginObject().name("id").value(winding.id());
+			number("current", winding.current());
+			number("linkage", winding.linkage());
+			number("apparentInductance", winding.apparentInductance());
+			json.endObject();
+		}
+		json.endArray();
+		inductance(point.inductance().windings(), point.inductance().differential());
+		json.endObject();
+	}
+
+	private void inductance(List<String> windings, double[][] matrix) throws IOException {
+		json.name("inductance").beginObject().name("windings").beginArray();
+		for (String winding : windings) {
+			json.value(winding);
+		}
+		json.endArray().name("differential").beginArray();
+		for (double[] row : matrix) {
+			json.beginArray();
+			for (double entry : row) {
+				json.value(entry);
+			}
+			json.endArray();
+		}
+		json.endArray().endObject();
+	}
+
+	private void number(String name, double value) throws IOException {
+		json.name(name);
+		if (Double.isFinite(value)) {
+			json.value(value);
+		} else {
+			json.nullValue();
+		}
+	}
+}
