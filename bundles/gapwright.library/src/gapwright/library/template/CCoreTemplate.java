@@ -1,0 +1,70 @@
+package gapwright.library.template;
+
+import java.util.List;
+import java.util.Map;
+
+import gapwright.model.Design;
+import gapwright.model.Joint;
+import gapwright.model.Leg;
+import gapwright.model.Winding;
+import gapwright.model.quantity.Quantity;
+
+/** Two legs and two yokes of one width; the winding on the gapped right leg. */
+final class CCoreTemplate implements Template {
+
+	private static final double MARGIN = 20;
+	private static final List<TemplateField> FIELDS = List.of(
+			StandardFields.length("width", "Width of the bars", "10 mm", "Across the flux, on the page."),
+			StandardFields.length("depth", "Depth", "15 mm", "Into the page; stack height."),
+			StandardFields.length("windowWidth", "Window width", "15 mm", "Clear distance between the legs."),
+			StandardFields.length("windowHeight", "Window height", "30 mm", "Clear distance between the yokes."),
+			StandardFields.length("gap", "Gap", "0.8 mm", "In the right leg; 0 mm for none."),
+			StandardFields.turns("24", "Of the winding on the right leg."), StandardFields.current("8 A"),
+			StandardFields.RIPPLE, StandardFields.TEMPERATURE);
+
+	@Override
+	public String id() {
+		return "c-core";
+	}
+
+	@Override
+	public String title() {
+		return "Gapped C core";
+	}
+
+	@Override
+	public String summary() {
+		return "Ferrite, one winding on a gapped leg.";
+	}
+
+	@Override
+	public List<TemplateField> fields() {
+		return FIELDS;
+	}
+
+	@Override
+	public Design build(Map<String, String> values) {
+		Entries entries = new Entries(FIELDS, values);
+		double width = entries.millimetres("width");
+		Quantity depth = entries.size("depth");
+		double left = MARGIN + width / 2;
+		double right = left + width + entries.millimetres("windowWidth");
+		double top = MARGIN + width / 2;
+		double bottom = top + width + entries.millimetres("windowHeight");
+		CoreSketch sketch = new CoreSketch("Gapped C core").material("mnzn-power-ferrite");
+		Joint topLeft = sketch.joint("top-left", left, top);
+		Joint topRight = sketch.joint("top-right", right, top);
+		Joint bottomLeft = sketch.joint("bottom-left", left, bottom);
+		Joint bottomRight = sketch.joint("bottom-right", right, bottom);
+		Leg wound = sketch.leg("right-leg", "right leg", bottomRight, topRight, width, depth);
+		sketch.leg("top-yoke", "top yoke", topRight, topLeft, width, depth);
+		sketch.leg("left-leg", "left leg", topLeft, bottomLeft, width, depth);
+		sketch.leg("bottom-yoke", "bottom yoke", bottomLeft, bottomRight, width, depth);
+		sketch.gap(wound, entries.notNegative("gap"));
+		Winding main = sketch.winding("main", "main");
+		sketch.coil(main, wound, entries.turns("turns"), 0.5);
+		sketch.current(sketch.operatingPoint("full-load", "full load, hot", entries.quantity("temperature")), main,
+				entries.quantity("current"), entries.notNegative("ripple"));
+		return sketch.design();
+	}
+}

@@ -1,0 +1,35 @@
+package gapwright.library.template;
+
+import java.util.List;
+import java.util.Map;
+
+import gapwright.model.Design;
+
+/** A core with its winding and an operating point, drawn to scale from a few figures. */
+public interface Template {
+
+	/** @return all templates, in the order to show them */
+	static List<Template> all() {
+		return List.of(new CCoreTemplate(), new ECoreTemplate(), new ThreeLegTemplate(), new ToroidTemplate(),
+				new EmptyTemplate());
+	}
+
+	/** @return stable name */
+	String id();
+
+	/** @return what people read */
+	String title();
+
+	/** @return a sentence on what comes of it */
+	String summary();
+
+	/** @return what it asks for, in the order to ask */
+	List<TemplateField> fields();
+
+	/**
+	 * @param values text by field key, as typed; a missing key means the standard
+	 * @return a new design, in no resource
+	 * @throws IllegalArgumentException with a sentence for the user, naming the field
+	 */
+	Design build(Map<String, String> values);
+}
