@@ -1,0 +1,54 @@
+package gapwright.ui.editor;
+
+import java.util.function.BiConsumer;
+
+import org.eclipse.emf.ecore.EObject;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
+
+import gapwright.model.Drive;
+import gapwright.model.Material;
+import gapwright.model.OperatingPoint;
+import gapwright.model.Winding;
+import gapwright.ui.pages.MaterialsPage;
+import gapwright.ui.pages.OperatingPointsPage;
+import gapwright.ui.pages.WindingsPage;
+import gapwright.ui.session.DesignSession;
+
+/** The pages beside the canvas, in their order. */
+final class FormPages {
+
+	private final WindingsPage windings;
+	private final OperatingPointsPage points;
+	private final MaterialsPage materials;
+
+	FormPages(Composite parent, DesignSession session) {
+		windings = new WindingsPage(parent, session);
+		points = new OperatingPointsPage(parent, session);
+		materials = new MaterialsPage(parent, session);
+	}
+
+	void addTo(BiConsumer<Control, String> adder) {
+		adder.accept(windings, "Windings");
+		adder.accept(points, "Operating points");
+		adder.accept(materials, "Materials");
+	}
+
+	/** Chooses the element on its page; answers the page's place among these, or −1 when it belongs on the canvas. */
+	int reveal(EObject element) {
+		if (element instanceof Winding) {
+			windings.reveal(element);
+			return 0;
+		}
+		if (element instanceof OperatingPoint || element instanceof Drive) {
+			points.reveal(element);
+			return 1;
+		}
+		if (element instanceof Material) {
+			materials.reveal(element);
+			return 2;
+		}
+		return -1;
+	}
+
+}

@@ -1,0 +1,181 @@
+package gapwright.ui.views;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.function.BiConsumer;
+import java.util.function.Consumer;
+import java.util.stream.IntStream;
+
+import org.eclipse.jface.dialogs.IDialogSettings;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.dnd.Clipboard;
+import org.eclipse.swt.dnd.TextTransfer;
+import org.eclipse.swt.dnd.Transfer;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Event;
+import org.eclipse.swt.widgets.Table;
+import org.eclipse.swt.widgets.TableColumn;
+import org.eclipse.swt.widgets.TableItem;
+
+/**
+ * A read-only table of figures: sorts by a click on a heading, copies, remembers its column widths and keeps its
+ * selection by row identity. Rows are shown on demand, so that thousands of legs cost what is on the screen.
+ *
+ * @param <R> a row; equal rows count as the same one, whatever their figures
+ */
+final class LedgerTable<R> {
+
+	private final Table table;
+	private final List<LedgerColumn<R>> columns;
+	private final LedgerOrder<R> order = new LedgerOrder<>();
+	private final IDialogSettings settings;
+	private List<R> design = List.of();
+	private List<R> rows = List.of();
+	private BiConsumer<TableItem, R> decorator = (item, row) -> { };
+	private Consumer<List<R>> onSelect = selected -> { };
+
+	LedgerTable(Composite parent, List<LedgerColumn<R>> columns, IDialogSettings settings) {
+		this.columns = List.copyOf(columns);
+		this.settings = settings;
+		table = new Table(parent, SWT.VIRTUAL | SWT.MULTI | SWT.FULL_SELECTION);
+		table.setHeaderVisible(true);
+		table.setLinesVisible(true);
+		for (LedgerColumn<R> column : columns) {
+			create(column);
+		}
+		table.addListener(SWT.SetData, event -> fill((TableItem) event.item));
+		table.addListener(SWT.Selection, event -> onSelect.accept(selection()));
+		table.addListener(SWT.KeyDown, this::key);
+	}
+
+	private void create(LedgerColumn<R> column) {
+		TableColumn control = new TableColumn(table, column.figures() ? SWT.RIGHT : SWT.LEFT);
+		control.setText(column.title());
+		control.setToolTipText(column.tip());
+		control.setMoveable(true);
+		control.setWidth(width(column));
+		control.addListener(SWT.Resize, event -> settings.put(column.key(), control.getWidth()));
+		control.addListener(SWT.Selection, event -> sort(column, control));
+	}
+
+	private int width(LedgerColumn<R> column) {
+		try {
+			return settings.getInt(column.key());
+		} catch (NumberFormatException e) {
+			return column.width();
+		}
+	}
+
+	private void sort(LedgerColumn<R> column, TableColumn control) {
+		List<R> selected = selection();
+		order.next(column);
+		table.setSortColumn(order.column() == null ? null : control);
+		table.setSortDirection(order.column() == null ? SWT.NONE : order.descending() ? SWT.DOWN : SWT.UP);
+		show(design);
+		select(selected);
+	}
+
+	private void key(Event event) {
+		if ((event.stateMask & SWT.MOD1) != 0 && event.keyCode == 'c') {
+			copy();
+		} else if ((event.stateMask & SWT.MOD1) != 0 && event.keyCode == 'a') {
+			selectAll();
+		}
+	}
+
+	/** @param next called for each row shown, after its texts are set */
+	void decorate(BiConsumer<TableItem, R> next) {
+		decorator = next;
+	}
+
+	void onSelect(Consumer<List<R>> listener) {
+		onSelect = listener;
+	}
+
+	/** Shows rows, keeping the order asked for and what is selected. */
+	void show(List<R> next) {
+		List<R> selected = selection();
+		design = List.copyOf(next);
+		rows = order.sorted(design);
+		table.setItemCount(rows.size());
+		table.clearAll();
+		select(selected);
+	}
+
+	private void fill(TableItem item) {
+		int index = table.indexOf(item);
+		if (index < rows.size()) {
+			R row = rows.get(index);
+			for (int k = 0; k < columns.size(); k++) {
+				item.setText(k, columns.get(k).shown().apply(row));
+			}
+			decorator.accept(item, row);
+		}
+	}
+
+	/** In the order shown. */
+	List<R> rows() {
+		return rows;
+	}
+
+	List<R> selection() {
+		List<R> selected = new ArrayList<>();
+		for (int index : sortedSelection()) {
+			if (index < rows.size()) {
+				selected.add(rows.get(index));
+			}
+		}
+		return selected;
+	}
+
+	private int[] sortedSelection() {
+		int[] indices = table.getSelectionIndices();
+		Arrays.sort(indices);
+		return indices;
+	}
+
+	/** Selects these rows and scrolls to the first, without telling the listener. */
+	void select(List<R> wanted) {
+		Set<R> set = new LinkedHashSet<>(wanted);
+		int[] indices = IntStream.range(0, rows.size()).filter(k -> set.contains(rows.get(k))).toArray();
+		int[] before = sortedSelection();
+		if (!Arrays.equals(before, indices)) {
+			table.setSelection(indices);
+		}
+	}
+
+	void selectAll() {
+		table.selectAll();
+		onSelect.accept(selection());
+	}
+
+	/** Puts the selected rows on the clipboard; all rows when none is selected. */
+	void copy() {
+		List<R> selected = selection();
+		copy(selected.isEmpty() ? rows : selected);
+	}
+
+	void copyAll() {
+		copy(rows);
+	}
+
+	private void copy(List<R> wanted) {
+		if (wanted.isEmpty()) {
+			return;
+		}
+		Clipboard clipboard = new Clipboard(table.getDisplay());
+		try {
+			clipboard.setContents(new Object[] { LedgerCopy.text(columns, wanted) },
+					new Transfer[] { TextTransfer.getInstance() });
+		} finally {
+			clipboard.dispose();
+		}
+	}
+
+	Table control() {
+		return table;
+	}
+}
