@@ -1,5 +1,8 @@
 package gapwright.study;
 
+import java.util.HashSet;
+import java.util.Set;
+
 import gapwright.model.check.Severity;
 import gapwright.physics.material.TableBh;
 import gapwright.physics.network.Solution;
@@ -13,6 +16,7 @@ final class LegJudge {
 	private final StudyInput input;
 	private final StudyInput.PointData point;
 	private final Findings findings;
+	private final Set<String> outside = new HashSet<>();
 
 	LegJudge(StudyInput input, StudyInput.PointData point, Findings findings) {
 		this.input = input;
@@ -33,9 +37,9 @@ final class LegJudge {
 			add(Severity.WARNING, Findings.NEAR, leg.id(), reached(peak, utilisation, saturation) + ", near is from "
 					+ Figures.perCent(input.nearFraction), "");
 		}
-		if (leg.saturation().isOutside(point.celsius())) {
-			add(Severity.NOTE, "temperature-outside-data", leg.id(),
-					"saturation of '" + leg.material() + "' is given from " + leg.saturation().range()
+		if (leg.saturation().isOutside(point.celsius()) && outside.add(leg.material())) {
+			add(Severity.NOTE, "temperature-outside-data", leg.material(),
+					"saturation is given from " + leg.saturation().range()
 							+ "; its end value is used at " + Figures.of(point.celsius()) + " °C",
 					"Add a saturation at this temperature.");
 		}
