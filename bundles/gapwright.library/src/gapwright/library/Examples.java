@@ -15,9 +15,9 @@ public final class Examples {
 			new Example("three-phase-reactor.gapwright", "Line reactor of the pump drive",
 					"Three laminated legs at five operating points; a stalled pump drives them over saturation."),
 			new Example("coupled-choke.gapwright", "Coupled choke of the two-phase converter",
-					"Windings on the outer legs share a gapped centre leg."),
+					"Windings on the outer legs share a gapped centre leg; air paths stand for the field across the windows."),
 			new Example("magnet-biased-choke.gapwright", "Magnet-biased choke of the tracker motor",
-					"A ferrite magnet holds the core below zero, so that the current has twice the room."));
+					"A magnet holds the core below zero, so that the current has twice the room."));
 
 	private Examples() {
 	}

@@ -97,6 +97,10 @@ public final class Lowering {
 		new TopologyFindings(design, network, legIndex, joints, islands, findings).add();
 		Limits limits = design.getLimits();
 		double near = limits == null || broken.contains(limits) ? DEFAULT_NEAR : limits.getNearFraction();
+		if (design.getLegs().isEmpty() && design.getAirPaths().isEmpty()) {
+			findings.note("design-empty", "", "nothing is drawn yet, so nothing is computed",
+					"Draw joints and legs between them, or start from a template.");
+		}
 		List<StudyInput.PointData> points = new ArrayList<>();
 		for (OperatingPoint point : design.getOperatingPoints()) {
 			points.add(point(point));

@@ -18,8 +18,8 @@ final class CCoreTemplate implements Template {
 			StandardFields.length("depth", "Depth", "15 mm", "Into the page; stack height."),
 			StandardFields.length("windowWidth", "Window width", "15 mm", "Clear distance between the legs."),
 			StandardFields.length("windowHeight", "Window height", "30 mm", "Clear distance between the yokes."),
-			StandardFields.length("gap", "Gap", "0.8 mm", "In the right leg; 0 mm for none."),
-			StandardFields.turns("24", "Of the winding on the right leg."), StandardFields.current("8 A"),
+			StandardFields.length("gap", "Gap", "1 mm", "In the right leg; 0 mm for none."),
+			StandardFields.turns("24", "Of the winding on the right leg."), StandardFields.current("7.5 A"),
 			StandardFields.RIPPLE, StandardFields.TEMPERATURE);
 
 	@Override

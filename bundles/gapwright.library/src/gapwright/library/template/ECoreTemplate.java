@@ -21,7 +21,7 @@ final class ECoreTemplate implements Template {
 			StandardFields.length("windowWidth", "Window width", "9 mm", "Clear distance between the legs."),
 			StandardFields.length("windowHeight", "Window height", "32 mm", "Clear distance between the yokes."),
 			StandardFields.length("gap", "Gap", "1.1 mm", "In the centre leg; 0 mm for none."),
-			StandardFields.turns("18", "Of the winding on the centre leg."), StandardFields.current("14 A"),
+			StandardFields.turns("18", "Of the winding on the centre leg."), StandardFields.current("12 A"),
 			StandardFields.RIPPLE, StandardFields.TEMPERATURE);
 
 	@Override
