@@ -9,6 +9,7 @@ import org.eclipse.core.runtime.NullProgressMonitor;
 import org.eclipse.core.runtime.CoreException;
 import org.eclipse.core.runtime.IProgressMonitor;
 import org.eclipse.emf.ecore.EObject;
+import org.eclipse.gef.GraphicalViewer;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.layout.GridData;
@@ -22,11 +23,13 @@ import org.eclipse.ui.dialogs.SaveAsDialog;
 import org.eclipse.ui.ide.IGotoMarker;
 import org.eclipse.ui.part.FileEditorInput;
 import org.eclipse.ui.part.MultiPageEditorPart;
+import org.eclipse.ui.views.contentoutline.IContentOutlinePage;
 import org.eclipse.ui.views.properties.IPropertySheetPage;
 import org.eclipse.ui.views.properties.tabbed.ITabbedPropertySheetPageContributor;
 import org.eclipse.ui.views.properties.tabbed.TabbedPropertySheetPage;
 
 import gapwright.model.Design;
+import gapwright.ui.canvas.CanvasPage;
 import gapwright.ui.fields.EntryText;
 import gapwright.ui.session.DesignSession;
 
@@ -37,6 +40,7 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 
 	private DesignFile file;
 	private DesignSession session;
+	private CanvasPage canvas;
 	private FormPages forms;
 	private FileWatch watch;
 	private Composite container;
@@ -84,6 +88,12 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 		session = new DesignSession(design, getContainer().getDisplay()::asyncExec);
 		session.history().addListener(() -> firePropertyChange(PROP_DIRTY));
 		bar.show(session);
+		canvas = new CanvasPage(session);
+		try {
+			setPageText(addPage(canvas, getEditorInput()), "Canvas");
+		} catch (PartInitException e) {
+			throw new IllegalStateException(e);
+		}
 		forms = new FormPages(getContainer(), session);
 		forms.addTo((control, title) -> setPageText(addPage(control), title));
 	}
@@ -106,6 +116,7 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 			session = null;
 		}
 		forms = null;
+		canvas = null;
 	}
 
 	@Override
@@ -168,10 +179,7 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 	/** Brings the page of an element to the front and selects it there. */
 	public void reveal(EObject element) {
 		if (session != null && element != null) {
-			int page = forms.reveal(element);
-			if (page >= 0) {
-				setActivePage(page);
-			}
+			setActivePage(forms.reveal(element) + 1);
 			session.selection().select(List.of(element), this);
 		}
 	}
@@ -192,6 +200,9 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 		if (type == IGotoMarker.class) {
 			IGotoMarker reveal = (IMarker marker) -> MarkerTarget.reveal(marker, this);
 			return type.cast(reveal);
+		}
+		if (canvas != null && (type == GraphicalViewer.class || type == IContentOutlinePage.class || type == CanvasPage.class)) {
+			return type == CanvasPage.class ? type.cast(canvas) : canvas.getAdapter(type);
 		}
 		return super.getAdapter(type);
 	}

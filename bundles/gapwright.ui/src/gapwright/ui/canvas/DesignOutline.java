@@ -1,0 +1,145 @@
+package gapwright.ui.canvas;
+
+import java.util.List;
+
+import org.eclipse.draw2d.LightweightSystem;
+import org.eclipse.draw2d.Viewport;
+import org.eclipse.draw2d.parts.ScrollableThumbnail;
+import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.edit.provider.IStructuredItemContentProvider;
+import org.eclipse.gef.LayerConstants;
+import org.eclipse.gef.editparts.FreeformGraphicalRootEditPart;
+import org.eclipse.gef.ui.parts.ScrollingGraphicalViewer;
+import org.eclipse.jface.viewers.ITreeContentProvider;
+import org.eclipse.jface.viewers.LabelProvider;
+import org.eclipse.jface.viewers.StructuredSelection;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.SashForm;
+import org.eclipse.swt.widgets.Canvas;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
+import org.eclipse.ui.views.contentoutline.ContentOutlinePage;
+
+import gapwright.model.Element;
+import gapwright.ui.fields.FeatureText;
+import gapwright.ui.session.DesignSession;
+import gapwright.ui.session.SelectionHub;
+
+/** The design as a tree, and below it the whole page in small. */
+final class DesignOutline extends ContentOutlinePage {
+
+	private final DesignSession session;
+	private final ScrollingGraphicalViewer viewer;
+	private final Runnable historyListener = this::refresh;
+	private final SelectionHub.Listener hubListener = this::reveal;
+	private SashForm sash;
+	private ScrollableThumbnail thumbnail;
+	private boolean following;
+
+	DesignOutline(DesignSession session, ScrollingGraphicalViewer viewer) {
+		this.session = session;
+		this.viewer = viewer;
+	}
+
+	@Override
+	public void createControl(Composite parent) {
+		sash = new SashForm(parent, SWT.VERTICAL);
+		super.createControl(sash);
+		getTreeViewer().setContentProvider(new Tree());
+		getTreeViewer().setLabelProvider(new LabelProvider() {
+
+			@Override
+			public String getText(Object element) {
+				return label((EObject) element);
+			}
+		});
+		getTreeViewer().setInput(session.design());
+		getTreeViewer().expandToLevel(2);
+		getTreeViewer().addSelectionChangedListener(event -> {
+			if (!following) {
+				List<EObject> chosen = event.getStructuredSelection().toList();
+				session.selection().select(chosen, this);
+			}
+		});
+		Canvas small = new Canvas(sash, SWT.BORDER | SWT.DOUBLE_BUFFERED);
+		LightweightSystem system = new LightweightSystem(small);
+		FreeformGraphicalRootEditPart root = (FreeformGraphicalRootEditPart) viewer.getRootEditPart();
+		thumbnail = new ScrollableThumbnail((Viewport) root.getFigure());
+		thumbnail.setSource(root.getLayer(LayerConstants.PRINTABLE_LAYERS));
+		system.setContents(thumbnail);
+		sash.setWeights(new int[] { 62, 38 });
+		session.history().addListener(historyListener);
+		session.selection().addListener(hubListener);
+	}
+
+	private static String label(EObject element) {
+		String kind = FeatureText.kind(element.eClass());
+		String name = element instanceof Element ? FeatureText.name(element) : "";
+		return name.isEmpty() ? kind : kind + "  " + name;
+	}
+
+	private void refresh() {
+		if (getControl() != null && !getControl().isDisposed()) {
+			getTreeViewer().refresh();
+		}
+	}
+
+	private void reveal(List<EObject> elements, Object source) {
+		if (source != this && getControl() != null && !getControl().isDisposed()) {
+			following = true;
+			try {
+				getTreeViewer().setSelection(new StructuredSelection(elements), true);
+			} finally {
+				following = false;
+			}
+		}
+	}
+
+	@Override
+	public Control getControl() {
+		return sash;
+	}
+
+	@Override
+	public void setFocus() {
+		getTreeViewer().getControl().setFocus();
+	}
+
+	@Override
+	public void dispose() {
+		session.history().removeListener(historyListener);
+		session.selection().removeListener(hubListener);
+		if (thumbnail != null) {
+			thumbnail.deactivate();
+		}
+		super.dispose();
+	}
+
+	/** Children as the model's item providers give them, elements only. */
+	private final class Tree implements ITreeContentProvider {
+
+		@Override
+		public Object[] getElements(Object input) {
+			return getChildren(input);
+		}
+
+		@Override
+		public Object[] getChildren(Object parent) {
+			Object adapter = session.history().domain().getAdapterFactory().adapt(parent,
+					IStructuredItemContentProvider.class);
+			return adapter instanceof IStructuredItemContentProvider provider
+					? provider.getElements(parent).stream().filter(Element.class::isInstance).toArray()
+					: new Object[0];
+		}
+
+		@Override
+		public Object getParent(Object element) {
+			return ((EObject) element).eContainer();
+		}
+
+		@Override
+		public boolean hasChildren(Object element) {
+			return getChildren(element).length > 0;
+		}
+	}
+}

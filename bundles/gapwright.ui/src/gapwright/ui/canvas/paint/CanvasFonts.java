@@ -1,0 +1,31 @@
+package gapwright.ui.canvas.paint;
+
+import org.eclipse.draw2d.FigureUtilities;
+import org.eclipse.jface.resource.FontRegistry;
+import org.eclipse.jface.resource.JFaceResources;
+import org.eclipse.swt.graphics.Font;
+import org.eclipse.swt.graphics.FontData;
+
+/** The workbench's font in the sizes of the canvas; owned by JFace's registry. */
+final class CanvasFonts {
+
+	private static final double POINTS_PER_PIXEL = 0.75;
+
+	private CanvasFonts() {
+	}
+
+	static Font get(double pixels, boolean bold) {
+		FontRegistry registry = JFaceResources.getFontRegistry();
+		FontData base = JFaceResources.getDefaultFont().getFontData()[0];
+		int points = Math.max(5, (int) Math.round(pixels * POINTS_PER_PIXEL));
+		String key = "gapwright.ui.canvas." + base.getName() + points;
+		if (!registry.hasValueFor(key)) {
+			registry.put(key, new FontData[] { new FontData(base.getName(), points, base.getStyle()) });
+		}
+		return bold ? registry.getBold(key) : registry.get(key);
+	}
+
+	static double width(String text, Font font) {
+		return FigureUtilities.getTextWidth(text, font);
+	}
+}
