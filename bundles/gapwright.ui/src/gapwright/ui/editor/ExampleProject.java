@@ -1,0 +1,45 @@
+package gapwright.ui.editor;
+
+import java.io.IOException;
+import java.io.InputStream;
+
+import org.eclipse.core.resources.IFile;
+import org.eclipse.core.resources.IProject;
+import org.eclipse.core.resources.ResourcesPlugin;
+import org.eclipse.core.runtime.CoreException;
+import org.eclipse.core.runtime.IProgressMonitor;
+import org.eclipse.core.runtime.Status;
+
+import gapwright.library.Example;
+import gapwright.library.Examples;
+
+/** A project with a copy of every example design. */
+public final class ExampleProject {
+
+	private static final String NAME = "irrigation-station";
+
+	private ExampleProject() {
+	}
+
+	/** Makes the project if there is none, and adds whatever example it lacks; what is there is left as it is. */
+	public static IProject create(IProgressMonitor monitor) throws CoreException {
+		IProject project = ResourcesPlugin.getWorkspace().getRoot().getProject(NAME);
+		if (!project.exists()) {
+			project.create(monitor);
+		}
+		if (!project.isOpen()) {
+			project.open(monitor);
+		}
+		for (Example example : Examples.all()) {
+			IFile file = project.getFile(example.fileName());
+			if (!file.exists()) {
+				try (InputStream content = example.open()) {
+					file.create(content, false, monitor);
+				} catch (IOException e) {
+					throw new CoreException(Status.error("The example '" + example.fileName() + "' cannot be read.", e));
+				}
+			}
+		}
+		return project;
+	}
+}
