@@ -82,7 +82,7 @@ public final class ElementFigures {
 	private static List<Figure> winding(WindingResult winding, InductanceMatrix matrix) {
 		int own = matrix.windings().indexOf(winding.id());
 		return List.of(
-				new Figure("Current", FigureFormat.si(winding.current(), "A"), "Mean; imposed by the drive, or reckoned for an imposed linkage."),
+				new Figure("Current", FigureFormat.si(winding.current(), "A"), "Mean; imposed by the drive, or computed for an imposed linkage."),
 				new Figure("Linkage", FigureFormat.si(winding.linkage(), "Wb"), "Sum of turns × flux, each coil with its sense."),
 				new Figure("Apparent inductance", FigureFormat.si(winding.apparentInductance(), "H"),
 						"Linkage over current; only where this winding alone carries current and no magnet acts."),

@@ -26,7 +26,7 @@ public final class OperatingPointsPage extends MasterDetailPage {
 	private DriveRows drives;
 
 	public OperatingPointsPage(Composite parent, DesignSession session) {
-		super(parent, session, "Operating points", "This design has no operating point yet, so nothing is reckoned. Add one.");
+		super(parent, session, "Operating points", "This design has no operating point yet, so nothing is computed. Add one.");
 		start();
 	}
 

@@ -74,7 +74,7 @@ public final class ResultsSection extends ElementSection {
 		OperatingPoint point = session().operatingPoint();
 		if (figures.isEmpty()) {
 			String trouble = session().trouble();
-			return trouble.isEmpty() ? "Nothing is reckoned for this element." : trouble;
+			return trouble.isEmpty() ? "Nothing is computed for this element." : trouble;
 		}
 		return "At " + FeatureText.name(point) + ", " + point.getTemperature();
 	}

@@ -68,7 +68,7 @@ final class StudyRunner {
 		private final int revision;
 
 		Answer(StudyInput input, int revision) {
-			super("Reckoning the design");
+			super("Computing the design");
 			this.input = input;
 			this.revision = revision;
 			setPriority(INTERACTIVE);

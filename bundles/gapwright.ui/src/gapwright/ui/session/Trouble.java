@@ -17,10 +17,10 @@ final class Trouble {
 			return "This design has no leg yet. Draw joints and legs on the canvas.";
 		}
 		if (session.operatingPoint() == null) {
-			return "This design has no operating point, so nothing is reckoned. Add one on the Operating points page.";
+			return "This design has no operating point, so nothing is computed. Add one on the Operating points page.";
 		}
 		if (session.result() == null) {
-			return "Being reckoned…";
+			return "Computing…";
 		}
 		OperatingPointResult point = session.pointResult();
 		if (point != null && point.converged()) {
