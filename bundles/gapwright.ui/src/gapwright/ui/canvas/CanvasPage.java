@@ -110,7 +110,7 @@ public final class CanvasPage extends EditorPart {
 		JFaceResources.getColorRegistry().addListener(themeListener);
 		getSite().setSelectionProvider(new CanvasSelection(viewer));
 		PlatformUI.getWorkbench().getHelpSystem().setHelp(control, "gapwright.help.canvas");
-		control.addListener(SWT.Resize, event -> zoom.fitOnce());
+		control.addListener(SWT.Resize, event -> zoom.resized());
 	}
 
 	private ISelectionChangedListener selectionListener() {
@@ -176,7 +176,7 @@ public final class CanvasPage extends EditorPart {
 			return type.cast(viewer);
 		}
 		if (type == IContentOutlinePage.class) {
-			return type.cast(new DesignOutline(session, viewer));
+			return type.cast(new DesignOutline(canvas, viewer));
 		}
 		return super.getAdapter(type);
 	}

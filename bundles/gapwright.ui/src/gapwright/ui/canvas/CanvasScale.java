@@ -40,19 +40,21 @@ public record CanvasScale(double pixelsPerMillimetre) {
 		return scaled;
 	}
 
-	/** @return distance of grid lines in mm that lie at least eight pixels apart: 1, 2, 5, 10 … */
-	public double gridMillimetres() {
-		double step = 0.1;
-		int[] factors = { 2, 5, 10 };
+	/** @return distance in mm of lines that lie at least so many pixels apart: 0.1, 0.2, 0.5, 1 … */
+	public double gridMillimetres(double leastPixels) {
 		double decade = 0.1;
-		int next = 0;
-		while (pixels(step) < 8) {
-			step = decade * factors[next];
-			if (++next == factors.length) {
-				next = 0;
-				decade *= 10;
+		while (true) {
+			for (int factor : new int[] { 1, 2, 5 }) {
+				if (pixels(decade * factor) >= leastPixels) {
+					return decade * factor;
+				}
 			}
+			decade *= 10;
 		}
-		return step;
+	}
+
+	/** @return distance in mm of the finest places told apart with the mouse */
+	public double gridMillimetres() {
+		return gridMillimetres(8);
 	}
 }

@@ -2,20 +2,15 @@ package gapwright.ui.canvas;
 
 import java.util.List;
 
-import org.eclipse.draw2d.LightweightSystem;
-import org.eclipse.draw2d.Viewport;
-import org.eclipse.draw2d.parts.ScrollableThumbnail;
+import org.eclipse.draw2d.FigureCanvas;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.edit.provider.IStructuredItemContentProvider;
-import org.eclipse.gef.LayerConstants;
-import org.eclipse.gef.editparts.FreeformGraphicalRootEditPart;
 import org.eclipse.gef.ui.parts.ScrollingGraphicalViewer;
 import org.eclipse.jface.viewers.ITreeContentProvider;
 import org.eclipse.jface.viewers.LabelProvider;
 import org.eclipse.jface.viewers.StructuredSelection;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.SashForm;
-import org.eclipse.swt.widgets.Canvas;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.ui.views.contentoutline.ContentOutlinePage;
@@ -29,15 +24,16 @@ import gapwright.ui.session.SelectionHub;
 final class DesignOutline extends ContentOutlinePage {
 
 	private final DesignSession session;
+	private final CanvasModel canvas;
 	private final ScrollingGraphicalViewer viewer;
 	private final Runnable historyListener = this::refresh;
 	private final SelectionHub.Listener hubListener = this::reveal;
 	private SashForm sash;
-	private ScrollableThumbnail thumbnail;
 	private boolean following;
 
-	DesignOutline(DesignSession session, ScrollingGraphicalViewer viewer) {
-		this.session = session;
+	DesignOutline(CanvasModel canvas, ScrollingGraphicalViewer viewer) {
+		this.canvas = canvas;
+		session = canvas.session();
 		this.viewer = viewer;
 	}
 
@@ -61,12 +57,7 @@ final class DesignOutline extends ContentOutlinePage {
 				session.selection().select(chosen, this);
 			}
 		});
-		Canvas small = new Canvas(sash, SWT.BORDER | SWT.DOUBLE_BUFFERED);
-		LightweightSystem system = new LightweightSystem(small);
-		FreeformGraphicalRootEditPart root = (FreeformGraphicalRootEditPart) viewer.getRootEditPart();
-		thumbnail = new ScrollableThumbnail((Viewport) root.getFigure());
-		thumbnail.setSource(root.getLayer(LayerConstants.PRINTABLE_LAYERS));
-		system.setContents(thumbnail);
+		new Thumbnail(sash, canvas, (FigureCanvas) viewer.getControl());
 		sash.setWeights(new int[] { 62, 38 });
 		session.history().addListener(historyListener);
 		session.selection().addListener(hubListener);
@@ -109,9 +100,6 @@ final class DesignOutline extends ContentOutlinePage {
 	public void dispose() {
 		session.history().removeListener(historyListener);
 		session.selection().removeListener(hubListener);
-		if (thumbnail != null) {
-			thumbnail.deactivate();
-		}
 		super.dispose();
 	}
 

@@ -14,11 +14,16 @@ public final class ZoomControl {
 
 	private static final double STEP = 1.25;
 	private static final int MARGIN = 24;
-	private static final int FITS = 4;
+	/** Room for labels on either side, px. */
+	private static final int BESIDE = 130;
+	/** Room for labels above and below, px. */
+	private static final int ABOVE = 85;
+	private static final double MOST_FIT = 2;
 
 	private final FigureCanvas control;
 	private final CanvasModel canvas;
-	private boolean fitted;
+	/** Until the user zooms, the drawing is fitted again whenever the control changes its size. */
+	private boolean fitting = true;
 
 	ZoomControl(FigureCanvas control, CanvasModel canvas) {
 		this.control = control;
@@ -50,6 +55,7 @@ public final class ZoomControl {
 
 	/** Keeps the place on the page that is under a point of the control where it is. */
 	private void zoomAt(int x, int y, double factor) {
+		fitting = false;
 		Point view = control.getViewport().getViewLocation();
 		double millimetreX = canvas.scale().millimetres(view.x + x);
 		double millimetreY = canvas.scale().millimetres(view.y + y);
@@ -59,28 +65,25 @@ public final class ZoomControl {
 				(int) Math.round(canvas.scale().pixels(millimetreY)) - y);
 	}
 
-	/** Fits when the control first gets a size. */
-	void fitOnce() {
-		if (!fitted && control.getClientArea().width > 2 * MARGIN) {
-			fitted = true;
+	/** The control has another size. */
+	void resized() {
+		if (fitting && control.getClientArea().width > 2 * MARGIN) {
 			fit();
 		}
 	}
 
 	/** Shows the whole drawing with its labels as large as it goes, at most at 200 %. */
 	public void fit() {
+		fitting = true;
 		org.eclipse.swt.graphics.Rectangle room = control.getClientArea();
-		// labels keep their size, so the box does not scale with the zoom: a few rounds settle it
-		double zoom = canvas.scale().zoom();
-		for (int round = 0; round < FITS; round++) {
-			double[] box = canvas.pictureAt(CanvasScale.zoom(zoom)).bounds();
-			if (box[2] <= 0 || box[3] <= 0) {
-				return;
-			}
-			zoom *= Math.min((room.width - 2 * MARGIN) / box[2], (room.height - 2 * MARGIN) / box[3]);
-			zoom = Math.max(0.1, Math.min(2, zoom));
+		// labels keep their size at every zoom: room is left for them round the drawing
+		double[] full = canvas.pictureAt(CanvasScale.zoom(1)).drawingBounds();
+		if (full[2] <= 0 || full[3] <= 0) {
+			return;
 		}
-		canvas.setScale(CanvasScale.zoom(zoom));
+		double zoom = Math.min(Math.max(room.width - 2 * BESIDE, room.width / 3) / full[2],
+				Math.max(room.height - 2 * ABOVE, room.height / 3) / full[3]);
+		canvas.setScale(CanvasScale.zoom(Math.min(MOST_FIT, zoom)));
 		control.getLightweightSystem().getUpdateManager().performUpdate();
 		double[] box = canvas.picture().bounds();
 		Rectangle all = new Rectangle((int) box[0], (int) box[1], (int) box[2], (int) box[3]);

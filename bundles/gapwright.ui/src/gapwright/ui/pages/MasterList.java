@@ -25,7 +25,7 @@ final class MasterList {
 	private final Composite buttons;
 	private final Function<EObject, String> label;
 	private final Consumer<EObject> onChoose;
-	private List<EObject> shown = List.of();
+	private List<EObject> shown = new ArrayList<>();
 	private EObject chosen;
 
 	MasterList(Composite parent, String title, Function<EObject, String> label, Consumer<EObject> onChoose) {

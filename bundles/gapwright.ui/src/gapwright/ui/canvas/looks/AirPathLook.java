@@ -11,13 +11,13 @@ import gapwright.ui.canvas.paint.Tone;
 public record AirPathLook(double[] curve) implements Look {
 
 	private static final int PIECES = 16;
-	private static final double BULGE = 0.22;
 
-	/** @return the curve between two points, bulging to the left of the way, more for each one between the same joints */
-	public static AirPathLook between(double x1, double y1, double x2, double y2, int rank) {
-		double bulge = BULGE * (1 + rank);
-		double mx = (x1 + x2) / 2 - bulge * (y2 - y1);
-		double my = (y1 + y2) / 2 + bulge * (x2 - x1);
+	/** @return the curve between two points; deviation in pixels to the side of the normal (-dy, dx) of the way */
+	public static AirPathLook between(double x1, double y1, double x2, double y2, double deviation) {
+		double length = Math.max(1e-9, Math.hypot(x2 - x1, y2 - y1));
+		// a quadratic curve reaches half way to its control point
+		double mx = (x1 + x2) / 2 - 2 * deviation * (y2 - y1) / length;
+		double my = (y1 + y2) / 2 + 2 * deviation * (x2 - x1) / length;
 		double[] curve = new double[2 * (PIECES + 1)];
 		for (int i = 0; i <= PIECES; i++) {
 			double t = (double) i / PIECES;

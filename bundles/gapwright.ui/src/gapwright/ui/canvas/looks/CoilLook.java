@@ -1,5 +1,8 @@
 package gapwright.ui.canvas.looks;
 
+import java.util.ArrayList;
+import java.util.List;
+
 import gapwright.ui.canvas.paint.Pen;
 import gapwright.ui.canvas.paint.Tone;
 
@@ -33,9 +36,19 @@ public record CoilLook(double[] toward, double[] away, double radius, boolean ma
 		return x >= box[0] && x <= box[0] + box[2] && y >= box[1] && y <= box[1] + box[3];
 	}
 
-	/** @return left, top, width, height of either side */
-	public double[][] sides() {
-		return new double[][] { Shapes.bounds(radius + 1, toward), Shapes.bounds(radius + 1, away) };
+	/** @return left, top, width, height of every turn; of either side where turns run together */
+	public List<double[]> boxes() {
+		List<double[]> boxes = new ArrayList<>();
+		for (double[] side : new double[][] { toward, away }) {
+			if (radius < LEAST) {
+				boxes.add(Shapes.bounds(radius + 1, side));
+				continue;
+			}
+			for (int i = 0; i < side.length; i += 2) {
+				boxes.add(new double[] { side[i] - radius, side[i + 1] - radius, 2 * radius, 2 * radius });
+			}
+		}
+		return boxes;
 	}
 
 	@Override

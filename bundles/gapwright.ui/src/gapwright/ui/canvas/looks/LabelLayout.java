@@ -15,11 +15,40 @@ public final class LabelLayout {
 	public record Place(double x, double y, double dx, double dy, double[] leader) {
 	}
 
+	private static final double STEP = 3;
+
 	private final List<double[]> taken = new ArrayList<>();
+	private final List<double[]> iron = new ArrayList<>();
 
 	/** Keeps labels off a box of left, top, width, height. */
 	public void block(double[] box) {
 		taken.add(box);
+	}
+
+	/** Keeps labels off a box, and leaders from crossing it: iron, or another label. */
+	public void blockIron(double[] box) {
+		taken.add(box);
+		iron.add(box);
+	}
+
+	/** A leader over another bar would point at that; its first pixels may touch the bar it comes from. */
+	private boolean crossesIron(double[] leader) {
+		if (leader.length == 0) {
+			return false;
+		}
+		double dx = leader[2] - leader[0];
+		double dy = leader[3] - leader[1];
+		double length = Math.hypot(dx, dy);
+		for (double s = STEP; s < length; s += STEP) {
+			double px = leader[0] + s * dx / length;
+			double py = leader[1] + s * dy / length;
+			for (double[] box : iron) {
+				if (px > box[0] && px < box[0] + box[2] && py > box[1] && py < box[1] + box[3]) {
+					return true;
+				}
+			}
+		}
+		return false;
 	}
 
 	/**
@@ -30,8 +59,11 @@ public final class LabelLayout {
 	public Placed place(List<Place> places, double width, double height) {
 		for (Place place : places) {
 			double[] box = box(place, width, height);
-			if (taken.stream().noneMatch(other -> Shapes.overlap(box, other))) {
-				taken.add(new double[] { box[0] - 2, box[1] - 1, box[2] + 4, box[3] + 2 });
+			if (!crossesIron(place.leader()) && taken.stream().noneMatch(other -> Shapes.overlap(box, other))) {
+				blockIron(new double[] { box[0] - 2, box[1] - 1, box[2] + 4, box[3] + 2 });
+				if (place.leader().length > 0) {
+					block(Shapes.bounds(2, place.leader()));
+				}
 				return new Placed(box, place, align(place));
 			}
 		}

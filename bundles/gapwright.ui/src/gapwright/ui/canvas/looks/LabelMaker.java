@@ -35,7 +35,9 @@ final class LabelMaker {
 	private static final double TITLE = 12;
 	private static final double SMALL = 11;
 	private static final double NEAR_BY = 6;
-	private static final double[] DISTANCES = { NEAR_BY, 26, 52, 90 };
+	private static final double[] DISTANCES = { NEAR_BY, 26, 52 };
+	/** Pixels of visible bar from which a leg gets its whole label. */
+	private static final double ROOMY = 70;
 	private static final double[] SHARES = { 0.5, 0.3, 0.7, 0.15, 0.85 };
 
 	private final Design design;
@@ -95,14 +97,12 @@ final class LabelMaker {
 			double step = (bar.end() - bar.start()) / pieces;
 			for (int i = 0; i < pieces; i++) {
 				double s = bar.start() + i * step;
-				layout.block(Shapes.bounds(1, scale.pixels(bar.block(s, s + step, -width / 2, width / 2))));
+				layout.blockIron(Shapes.bounds(1, scale.pixels(bar.block(s, s + step, -width / 2, width / 2))));
 			}
 		}
 		for (EObject element : picture.elements()) {
 			if (picture.look(element) instanceof CoilLook coil) {
-				for (double[] side : coil.sides()) {
-					layout.block(side);
-				}
+				coil.boxes().forEach(layout::block);
 			} else if (picture.look(element) instanceof JointLook joint) {
 				layout.block(joint.bounds());
 			}
@@ -154,6 +154,9 @@ final class LabelMaker {
 		int outward = (middle[0] - centre[0]) * -bar.uy() + (middle[1] - centre[1]) * bar.ux() > 1e-6 ? -1 : 1;
 		double coil = scale.pixels(build.getOrDefault(bar.leg(), 0.0));
 		for (double distance : DISTANCES) {
+			if (distance > NEAR_BY && places.size() == 2 * SHARES.length) {
+				ends(bar, places);
+			}
 			for (double share : SHARES) {
 				for (int side : new int[] { outward, -outward }) {
 					double s = bar.start() + share * (bar.end() - bar.start());
@@ -161,26 +164,26 @@ final class LabelMaker {
 				}
 			}
 		}
-		ends(bar, places);
 		List<LabelLine> lines = lines(bar.leg(), found);
 		Tone badge = found == null ? null : found.state() == LegState.OVER ? Tone.OVER
 				: found.state() == LegState.NEAR ? Tone.NEAR : null;
-		if (!put(bar.leg(), lines, places, badge) && lines.size() > 1) {
-			put(bar.leg(), lines.subList(lines.size() - 1, lines.size()), places, badge);
+		boolean roomy = scale.pixels(bar.end() - bar.start()) >= ROOMY || badge != null;
+		if (!(roomy && put(bar.leg(), lines, places, badge)) && found != null) {
+			put(bar.leg(), brief(found, lines), places, badge);
 		}
 	}
 
 	/** Beyond either end along the axis, past whatever the bar ends in: for a leg enclosed by others. */
 	private void ends(Bar bar, List<LabelLayout.Place> places) {
-		for (double distance : new double[] { 30, 60, 90 }) {
-			for (int end : new int[] { 1, -1 }) {
-				double[] at = scale.pixels(end > 0 ? bar.at(bar.end(), 0) : bar.at(bar.start(), 0));
+		for (double distance : new double[] { 20, 44, 74 }) {
+			for (int end : new int[] { -1, 1 }) {
+				double[] at = scale.pixels(end > 0 ? bar.at(bar.length(), 0) : bar.at(0, 0));
 				double dx = end * bar.ux();
 				double dy = end * bar.uy();
-				double past = distance + scale.pixels(bar.width() / 2);
-				double x = at[0] + dx * past;
-				double y = at[1] + dy * past;
-				double[] leader = { at[0], at[1], x - dx * 2, y - dy * 2 };
+				double wall = scale.pixels(end > 0 ? bar.length() - bar.end() : bar.start());
+				double x = at[0] + dx * (wall + distance);
+				double y = at[1] + dy * (wall + distance);
+				double[] leader = { at[0] + dx * (wall + 3), at[1] + dy * (wall + 3), x - dx * 2, y - dy * 2 };
 				places.add(new LabelLayout.Place(x, y, dx, dy, leader));
 			}
 		}
@@ -199,6 +202,14 @@ final class LabelMaker {
 		}
 		String used = FigureFormat.percent(found.utilisation()) + " of " + FigureFormat.fluxDensity(found.saturation());
 		return List.of(name, density, new LabelLine(used, SMALL, false, loud ? tone : Tone.NOTE));
+	}
+
+	/** The share of saturation alone, for a leg without room for more. */
+	private static List<LabelLine> brief(LegResult found, List<LabelLine> lines) {
+		LabelLine last = lines.get(lines.size() - 1);
+		return Double.isNaN(found.utilisation()) ? List.of(last)
+				: List.of(new LabelLine(FigureFormat.percent(found.utilisation()), SMALL, last.tone() != Tone.NOTE,
+						last.tone()));
 	}
 
 	private boolean put(EObject element, List<LabelLine> lines, List<LabelLayout.Place> places, Tone badge) {
@@ -243,7 +254,7 @@ final class LabelMaker {
 		}
 		WindingResult found = result == null ? null : result.winding(winding.getId());
 		if (found != null) {
-			text.append("     L ").append(FigureFormat.si(result.inductance().of(winding.getId()), "H"));
+			text.append(" · L ").append(FigureFormat.si(result.inductance().of(winding.getId()), "H"));
 			text.append(found.current() == 0 ? "" : " at bias");
 		}
 		return text.toString();

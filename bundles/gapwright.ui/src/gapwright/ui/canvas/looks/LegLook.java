@@ -14,12 +14,16 @@ import gapwright.ui.canvas.paint.Tone;
  * @param width    of the bar
  * @param state    null while there is no result
  * @param fluxSign 1 along the axis, -1 against it, 0 for none
+ * @param crossed  pixels along the axis at which a gap or magnet crosses it
  */
-public record LegLook(double[] outline, double[] tube, double[] axis, double width, LegState state, int fluxSign)
+public record LegLook(double[] outline, double[] tube, double[] axis, double width, LegState state, int fluxSign,
+		double[] crossed)
 		implements Look {
 
 	private static final double OUTER = 4;
 	private static final double CHEVRON_DISTANCE = 60;
+	private static final double CHEVRON_CLEAR = 28;
+	private static final double CROSSING = 14;
 
 	@Override
 	public double[] bounds() {
@@ -89,6 +93,18 @@ public record LegLook(double[] outline, double[] tube, double[] axis, double wid
 		return grown;
 	}
 
+	private boolean isCrossed(int count, double clear, double length) {
+		for (int k = 0; k < count; k++) {
+			double at = length * (clear + (1 - 2 * clear) * (k + 0.5) / count);
+			for (double s : crossed) {
+				if (Math.abs(s - at) < CROSSING) {
+					return true;
+				}
+			}
+		}
+		return false;
+	}
+
 	private void chevrons(Pen pen) {
 		double dx = axis[2] - axis[0];
 		double dy = axis[3] - axis[1];
@@ -99,9 +115,13 @@ public record LegLook(double[] outline, double[] tube, double[] axis, double wid
 		}
 		double ux = fluxSign * dx / length;
 		double uy = fluxSign * dy / length;
-		int count = Math.max(1, (int) (length / CHEVRON_DISTANCE));
+		// the ends belong to the joints' rings
+		double clear = Math.min(CHEVRON_CLEAR, length / 5) / length;
+		int count = Math.max(1, (int) (length * (1 - 2 * clear) / CHEVRON_DISTANCE));
+		// where a chevron would hide under a gap, one more moves them all off it
+		count += isCrossed(count, clear, length) ? 1 : 0;
 		for (int k = 0; k < count; k++) {
-			double share = (k + 0.5) / count;
+			double share = clear + (1 - 2 * clear) * (k + 0.5) / count;
 			double x = axis[0] + share * dx;
 			double y = axis[1] + share * dy;
 			double back = size / 1.3;

@@ -57,8 +57,21 @@ public final class Picture {
 
 	/** @return left, top, width, height of all */
 	public double[] bounds() {
+		List<double[]> boxes = new ArrayList<>();
+		looks.values().forEach(look -> boxes.add(look.bounds()));
+		labels.values().forEach(label -> boxes.add(label.bounds()));
+		headings.forEach(label -> boxes.add(label.bounds()));
+		return around(boxes);
+	}
+
+	/** @return left, top, width, height of the drawing without its labels */
+	public double[] drawingBounds() {
+		return around(looks.values().stream().map(Look::bounds).toList());
+	}
+
+	private static double[] around(List<double[]> boxes) {
 		double[] all = null;
-		for (double[] box : boxes()) {
+		for (double[] box : boxes) {
 			double[] corners = { box[0], box[1], box[0] + box[2], box[1] + box[3] };
 			all = all == null ? box : Shapes.bounds(0, new double[] { all[0], all[1], all[0] + all[2], all[1] + all[3] },
 					corners);
@@ -66,21 +79,13 @@ public final class Picture {
 		return all == null ? NOTHING : all;
 	}
 
-	private List<double[]> boxes() {
-		List<double[]> boxes = new ArrayList<>();
-		looks.values().forEach(look -> boxes.add(look.bounds()));
-		labelBoxes(boxes);
-		return boxes;
-	}
-
-	private void labelBoxes(List<double[]> boxes) {
-		labels.values().forEach(label -> boxes.add(label.bounds()));
-		headings.forEach(label -> boxes.add(label.bounds()));
-	}
-
 	public void paint(Pen pen) {
-		looks.values().forEach(look -> look.paint(pen));
+		paintDrawing(pen);
 		paintLabels(pen);
+	}
+
+	public void paintDrawing(Pen pen) {
+		looks.values().forEach(look -> look.paint(pen));
 	}
 
 	public void paintLabels(Pen pen) {

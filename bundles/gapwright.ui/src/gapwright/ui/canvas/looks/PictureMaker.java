@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.DoubleStream;
 
 import gapwright.model.AirPath;
 import gapwright.model.Coil;
@@ -30,6 +31,10 @@ public final class PictureMaker {
 
 	private static final double LEAST_SLOT = 7;
 	private static final double SLOT_OVERHANG = 3;
+	/** Distance of an air path from the coil or wall it passes, mm. */
+	private static final double AIR_CLEARANCE = 2;
+	/** Swing of an air path with nothing in its way, as a share of its length. */
+	private static final double FREE_SWING = 0.12;
 
 	private final Design design;
 	private final OperatingPoint point;
@@ -55,7 +60,6 @@ public final class PictureMaker {
 	}
 
 	public Picture make() {
-		airPaths();
 		for (Bar bar : scene.bars()) {
 			picture.add(bar.leg(), leg(bar));
 		}
@@ -68,6 +72,7 @@ public final class PictureMaker {
 			}
 		}
 		coils();
+		airPaths();
 		for (Joint joint : design.getJoints()) {
 			double x = scale.pixels(Scene.x(joint));
 			double y = scale.pixels(Scene.y(joint));
@@ -89,9 +94,33 @@ public final class PictureMaker {
 				int b = design.getJoints().indexOf(to);
 				int rank = between.merge(Math.min(a, b) + "-" + Math.max(a, b), 1, Integer::sum) - 1;
 				picture.add(path, AirPathLook.between(scale.pixels(Scene.x(from)), scale.pixels(Scene.y(from)),
-						scale.pixels(Scene.x(to)), scale.pixels(Scene.y(to)), rank));
+						scale.pixels(Scene.x(to)), scale.pixels(Scene.y(to)), scale.pixels(deviation(from, to, rank))));
 			}
 		}
+	}
+
+	/** How far an air path swings out, mm: clear of a leg between the same joints and its coils, inwards there. */
+	private double deviation(Joint from, Joint to, int rank) {
+		double dx = Scene.x(to) - Scene.x(from);
+		double dy = Scene.y(to) - Scene.y(from);
+		double clear = 0;
+		for (Bar bar : scene.bars()) {
+			Leg leg = bar.leg();
+			if (leg.getFrom() == from && leg.getTo() == to || leg.getFrom() == to && leg.getTo() == from) {
+				clear = Math.max(clear, bar.width() / 2 + build.getOrDefault(leg, 0.0) + AIR_CLEARANCE);
+			}
+		}
+		double inward = (middleX() - Scene.x(from)) * -dy + (middleY() - Scene.y(from)) * dx;
+		double free = FREE_SWING * Math.hypot(dx, dy);
+		return (inward < 0 ? -1 : 1) * ((clear > 0 ? clear : free) + rank * free / 2);
+	}
+
+	private double middleX() {
+		return design.getJoints().stream().mapToDouble(Scene::x).average().orElse(0);
+	}
+
+	private double middleY() {
+		return design.getJoints().stream().mapToDouble(Scene::y).average().orElse(0);
 	}
 
 	private LegLook leg(Bar bar) {
@@ -102,12 +131,19 @@ public final class PictureMaker {
 		double[] axis = scale.pixels(new double[] { start[0], start[1], end[0], end[1] });
 		double width = scale.pixels(bar.width());
 		if (leg == null) {
-			return new LegLook(outline, new double[0], axis, width, null, 0);
+			return new LegLook(outline, new double[0], axis, width, null, 0, new double[0]);
 		}
 		// what cannot be judged shows a thin thread of flux
 		double share = leg.state() == LegState.UNKNOWN ? 0.1 : Math.min(1, leg.utilisation());
 		return new LegLook(outline, scale.pixels(bar.outline(share)), axis, width, leg.state(),
-				(int) Math.signum(leg.flux()));
+				(int) Math.signum(leg.flux()), crossed(bar));
+	}
+
+	private double[] crossed(Bar bar) {
+		DoubleStream gaps = bar.leg().getGaps().stream().mapToDouble(Gap::getPosition);
+		Magnet magnet = bar.leg().getMagnet();
+		return DoubleStream.concat(gaps, magnet == null ? DoubleStream.empty() : DoubleStream.of(magnet.getPosition()))
+				.map(position -> scale.pixels(position * bar.length() - bar.start())).toArray();
 	}
 
 	private GapLook gap(Gap gap, Bar bar) {

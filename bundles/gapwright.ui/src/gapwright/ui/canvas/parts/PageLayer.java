@@ -15,7 +15,9 @@ final class PageLayer extends FreeformLayer {
 
 	/** Room round the drawing that can be scrolled to, px. */
 	private static final int MARGIN = 60;
-	private static final int MAJOR = 5;
+	/** Grid lines lie at least this far apart, px. */
+	private static final double LEAST_CELL = 24;
+	private static final int MAJOR = 2;
 
 	private CanvasScale scale = CanvasScale.zoom(1);
 	private Picture picture;
@@ -47,7 +49,7 @@ final class PageLayer extends FreeformLayer {
 		Rectangle clip = graphics.getClip(new Rectangle());
 		graphics.setBackgroundColor(ThemeColours.PAPER.get());
 		graphics.fillRectangle(clip);
-		double step = scale.gridMillimetres() * (scale.pixels(scale.gridMillimetres()) < 12 ? 5 : 1);
+		double step = scale.gridMillimetres(LEAST_CELL);
 		graphics.setForegroundColor(ThemeColours.valueOf(Tone.GRID.name()).get());
 		graphics.setLineWidth(1);
 		for (long k = (long) Math.floor(scale.millimetres(clip.x) / step); scale.pixels(k * step) <= clip.right(); k++) {

@@ -24,6 +24,8 @@ public record TurnPlaces(double[] along, double[] outward, double pitch) {
 	private static final double INSULATION = 1.12;
 	/** Pitch where no wire is chosen, mm. */
 	private static final double PITCH = 2.1;
+	/** Kept free on either side of a gap, mm: fringing heats turns there, and its length is written there. */
+	private static final double SLOT_CLEAR = 1;
 	/** Share of the visible leg that all its coils may cover. */
 	private static final double COVERED = 0.8;
 	/** Rows that a coil may have before its turns are drawn smaller than they are. */
@@ -59,20 +61,21 @@ public record TurnPlaces(double[] along, double[] outward, double pitch) {
 		return Math.min(wanted, Math.max(most, 1e-3));
 	}
 
-	/** Positions of one row, symmetric about the centre, none over a slot. */
+	/** Positions of one row: symmetric about the centre, or packed from both sides of the first slot beneath it. */
 	private static double[] row(int count, double pitch, double centre, List<double[]> slots) {
+		double first = centre - (count - 1) / 2.0 * pitch;
 		double[] places = new double[count];
 		for (int i = 0; i < count; i++) {
-			places[i] = centre + (i - (count - 1) / 2.0) * pitch;
+			places[i] = first + i * pitch;
 		}
 		for (double[] slot : slots) {
-			for (int i = 0; i < count; i++) {
-				double half = slot[1] + pitch / 2;
-				double first = centre - (count - 1) / 2.0 * pitch;
-				boolean over = slot[0] > first - pitch && slot[0] < first + count * pitch;
-				if (over) {
-					places[i] += places[i] < slot[0] || places[i] == slot[0] && i < count / 2 ? -half : half;
+			if (slot[0] > first - pitch && slot[0] < first + count * pitch) {
+				int before = (int) Math.max(0, Math.min(count, Math.round((slot[0] - first) / pitch + 0.5)));
+				for (int i = 0; i < count; i++) {
+					places[i] = i < before ? slot[0] - slot[1] - (before - i - 0.5) * pitch
+							: slot[0] + slot[1] + (i - before + 0.5) * pitch;
 				}
+				break;
 			}
 		}
 		return places;
@@ -83,7 +86,7 @@ public record TurnPlaces(double[] along, double[] outward, double pitch) {
 		List<double[]> slots = new ArrayList<>();
 		for (Gap gap : bar.leg().getGaps()) {
 			double length = Math.max(0, LegGeometry.si(gap.getLength()) * 1e3) * gap.getPieces();
-			slots.add(new double[] { gap.getPosition() * bar.length(), length / 2 + 0.3 });
+			slots.add(new double[] { gap.getPosition() * bar.length(), length / 2 + SLOT_CLEAR });
 		}
 		return slots;
 	}
