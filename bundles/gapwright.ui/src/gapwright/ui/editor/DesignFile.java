@@ -82,6 +82,7 @@ final class DesignFile {
 		DesignWriter.write(design, path);
 		if (resource != null) {
 			resource.refreshLocal(IResource.DEPTH_ZERO, monitor);
+			SavedMarkers.follow(resource);
 		}
 	}
 }

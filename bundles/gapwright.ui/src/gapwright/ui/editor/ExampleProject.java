@@ -12,13 +12,18 @@ import org.eclipse.core.runtime.Status;
 
 import gapwright.library.Example;
 import gapwright.library.Examples;
+import gapwright.workspace.DesignNature;
 
-/** A project with a copy of every example design. */
+/** A project with a copy of every example design, checked at every build. */
 public final class ExampleProject {
 
 	private static final String NAME = "irrigation-station";
 
 	private ExampleProject() {
+	}
+
+	static boolean exists() {
+		return ResourcesPlugin.getWorkspace().getRoot().getProject(NAME).exists();
 	}
 
 	/** Makes the project if there is none, and adds whatever example it lacks; what is there is left as it is. */
@@ -40,6 +45,7 @@ public final class ExampleProject {
 				}
 			}
 		}
+		DesignNature.addTo(project, monitor);
 		return project;
 	}
 }

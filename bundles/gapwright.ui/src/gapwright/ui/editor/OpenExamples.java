@@ -30,8 +30,9 @@ public final class OpenExamples implements IStartup {
 		}
 		Job.create("Opening the example designs", monitor -> {
 			try {
+				boolean first = !ExampleProject.exists();
 				IProject project = ExampleProject.create(monitor);
-				PlatformUI.getWorkbench().getDisplay().asyncExec(() -> open(project));
+				PlatformUI.getWorkbench().getDisplay().asyncExec(() -> open(project, first));
 				return Status.OK_STATUS;
 			} catch (CoreException e) {
 				return e.getStatus();
@@ -39,12 +40,16 @@ public final class OpenExamples implements IStartup {
 		}).schedule();
 	}
 
-	private static void open(IProject project) {
+	/** @param first whether the window has never been sized by its user */
+	private static void open(IProject project, boolean first) {
 		IWorkbenchWindow window = PlatformUI.getWorkbench().getActiveWorkbenchWindow();
 		if (window == null) {
 			// the window is not in front yet; the loop comes round again
-			Display.getCurrent().timerExec(100, () -> open(project));
+			Display.getCurrent().timerExec(100, () -> open(project, first));
 			return;
+		}
+		if (first) {
+			window.getShell().setMaximized(true);
 		}
 		try {
 			IDE.openEditor(window.getActivePage(), project.getFile(Examples.all().get(0).fileName()), true);

@@ -3,6 +3,8 @@ package gapwright.ui.wizards;
 import java.util.Map;
 
 import org.eclipse.core.resources.IFile;
+import org.eclipse.core.resources.IProject;
+import org.eclipse.core.runtime.jobs.Job;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.jface.viewers.IStructuredSelection;
 import org.eclipse.jface.viewers.StructuredSelection;
@@ -16,6 +18,7 @@ import org.eclipse.ui.wizards.newresource.BasicNewResourceWizard;
 
 import gapwright.model.Design;
 import gapwright.model.DesignWriter;
+import gapwright.workspace.DesignNature;
 
 /** Makes a design file from a core of given dimensions or from an example, and opens it. */
 public final class NewDesignWizard extends Wizard implements INewWizard {
@@ -77,6 +80,7 @@ public final class NewDesignWizard extends Wizard implements INewWizard {
 		if (file == null) {
 			return false;
 		}
+		checkAtEveryBuild(file.getProject());
 		BasicNewResourceWizard.selectAndReveal(file, workbench.getActiveWorkbenchWindow());
 		try {
 			IDE.openEditor(workbench.getActiveWorkbenchWindow().getActivePage(), file, true);
@@ -84,5 +88,13 @@ public final class NewDesignWizard extends Wizard implements INewWizard {
 			MessageDialog.openError(getShell(), getWindowTitle(), "The file was made, but it could not be opened: " + e.getMessage());
 		}
 		return true;
+	}
+
+	private static void checkAtEveryBuild(IProject project) {
+		Job job = Job.create("Switching the checks of designs on", monitor -> {
+			DesignNature.addTo(project, monitor);
+		});
+		job.setRule(project.getWorkspace().getRoot());
+		job.schedule();
 	}
 }
