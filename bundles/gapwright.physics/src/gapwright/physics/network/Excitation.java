@@ -54,6 +54,16 @@ public final class Excitation {
 		return Double.isNaN(current[winding]);
 	}
 
+	/** @return whether any winding's current is unknown */
+	public boolean imposesAnyLinkage() {
+		for (double amperes : current) {
+			if (Double.isNaN(amperes)) {
+				return true;
+			}
+		}
+		return false;
+	}
+
 	/** @return A, or NaN where the linkage is imposed */
 	public double current(int winding) {
 		return current[winding];

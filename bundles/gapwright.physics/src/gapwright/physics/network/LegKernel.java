@@ -35,11 +35,13 @@ final class LegKernel {
 		if (reactive == 0) {
 			return Math.copySign(high, f);
 		}
+		// the three terms of the defect are known no better; steps below that would wander without end
+		double rounding = 2 * Math.ulp(target);
 		double low = 0;
 		double h = Math.copySign(1, guess) == Math.copySign(1, f) ? Math.min(Math.abs(guess), high) : 0;
 		for (int i = 0; i < MOST_STEPS; i++) {
 			double defect = h * length + reactive * curve.fluxDensity(h) - target;
-			if (defect == 0) {
+			if (Math.abs(defect) <= rounding) {
 				break;
 			}
 			if (defect > 0) {

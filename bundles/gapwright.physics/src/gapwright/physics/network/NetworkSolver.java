@@ -41,6 +41,7 @@ public final class NetworkSolver {
 	private final double[] conductance;
 	private final double[] potentialStep;
 	private final double[] currentStep;
+	private final ImposedLinkages none;
 	private State state;
 	private State trial;
 
@@ -59,6 +60,7 @@ public final class NetworkSolver {
 		factor = unknowns <= DENSE_UP_TO ? new DenseFactor(unknowns, first, second)
 				: new SparseFactor(unknowns, first, second);
 		inductances = new Inductances(network, topology, new CoilTable(network));
+		none = new ImposedLinkages(Excitation.currents(), inductances);
 		conductance = new double[branches];
 		potentialStep = new double[unknowns];
 		currentStep = new double[network.windingCount()];
@@ -119,7 +121,7 @@ public final class NetworkSolver {
 	}
 
 	private Solution descend(Excitation excitation) {
-		ImposedLinkages imposed = new ImposedLinkages(excitation, inductances);
+		ImposedLinkages imposed = excitation.imposesAnyLinkage() ? new ImposedLinkages(excitation, inductances) : none;
 		state.evaluate();
 		boolean balancedBefore = false;
 		for (int iteration = 0; iteration <= MOST_ITERATIONS; iteration++) {
