@@ -37,8 +37,11 @@ public final class Main {
 		System.exit(status);
 	}
 
-	/** @return an exit status; nothing is thrown */
-	static int run(List<String> arguments, PrintStream out, PrintStream err) {
+	/**
+	 * @param arguments as typed after the command's name
+	 * @return an exit status; nothing is thrown
+	 */
+	public static int run(List<String> arguments, PrintStream out, PrintStream err) {
 		try {
 			String verb = arguments.isEmpty() ? "" : arguments.get(0);
 			switch (verb) {

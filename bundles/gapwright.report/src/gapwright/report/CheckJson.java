@@ -12,6 +12,7 @@ import gapwright.study.AirPathResult;
 import gapwright.study.Finding;
 import gapwright.study.GapResult;
 import gapwright.study.LegResult;
+import gapwright.study.LegState;
 import gapwright.study.OperatingPointResult;
 import gapwright.study.StudyResult;
 import gapwright.study.WindingResult;
@@ -42,7 +43,7 @@ public final class CheckJson {
 	private void write(StudyResult result, String file, String version) throws IOException {
 		json.beginObject();
 		json.name("tool").value("gapwright").name("version").value(version).name("file").value(file);
-		json.name("design").value(result.design()).name("worst").value(result.worst().word());
+		json.name("design").value(result.design()).name("worst").value(worst(result));
 		json.name("operatingPoints").beginArray();
 		for (OperatingPointResult point : result.operatingPoints()) {
 			operatingPoint(point);
@@ -55,6 +56,11 @@ public final class CheckJson {
 			json.name("message").value(finding.message()).name("hint").value(finding.hint()).endObject();
 		}
 		json.endArray().endObject();
+	}
+
+	/** @return null when something is not computed: nobody shall read "within" out of a result that is not whole */
+	private static String worst(StudyResult result) {
+		return result.isIncomplete() && result.worst() != LegState.OVER ? null : result.worst().word();
 	}
 
 	private void operatingPoint(OperatingPointResult point) throws IOException {
