@@ -14,9 +14,11 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.io.TempDir;
 
 import com.google.gson.JsonObject;
 import com.google.gson.JsonParser;
@@ -34,11 +36,24 @@ class MainTest {
 	private static final String NEAR = "boost-choke.gapwright";
 	private static final String OVER = "three-phase-reactor.gapwright";
 
-	@TempDir
-	Path folder;
-
+	private Path folder;
 	private String out;
 	private String err;
+
+	@BeforeEach
+	void makeFolder() throws IOException {
+		folder = Files.createTempDirectory("gapwright-cli");
+	}
+
+	@AfterEach
+	void removeFolder() throws IOException {
+		try (Stream<Path> files = Files.list(folder)) {
+			for (Path file : files.toList()) {
+				Files.delete(file);
+			}
+		}
+		Files.delete(folder);
+	}
 
 	private int run(String... arguments) {
 		ByteArrayOutputStream outBytes = new ByteArrayOutputStream();
