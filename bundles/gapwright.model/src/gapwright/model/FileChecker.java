@@ -71,6 +71,9 @@ final class FileChecker {
 		factory.setProperty(XMLInputFactory.IS_SUPPORTING_EXTERNAL_ENTITIES, false);
 		factory.setProperty(XMLInputFactory.SUPPORT_DTD, false);
 		factory.setXMLResolver((publicId, systemId, base, namespace) -> new ByteArrayInputStream(new byte[0]));
+		factory.setXMLReporter((message, error, information, location) -> {
+			// whatever matters arrives as an exception; the parser would print it as well
+		});
 		try {
 			XMLStreamReader xml = factory.createXMLStreamReader(new ByteArrayInputStream(content));
 			while (xml.hasNext() && problems.size() < MOST_PROBLEMS) {
