@@ -43,12 +43,14 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 	private CanvasPage canvas;
 	private FormPages forms;
 	private FileWatch watch;
-	private Composite container;
+	private EditorSelection selection;
 	private OperatingPointBar bar;
 
 	@Override
 	public void init(IEditorSite site, IEditorInput input) throws PartInitException {
 		super.init(site, input);
+		selection = new EditorSelection(this, this::chosenOnForm);
+		site.setSelectionProvider(selection);
 		setPartName(input.getName());
 		try {
 			file = DesignFile.of(input);
@@ -64,7 +66,7 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 		grid.marginWidth = 0;
 		grid.marginHeight = 0;
 		grid.verticalSpacing = 0;
-		container = super.createPageContainer(parent);
+		Composite container = super.createPageContainer(parent);
 		container.setLayout(grid);
 		bar = new OperatingPointBar(container);
 		Composite pages = new Composite(container, 0);
@@ -96,6 +98,17 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 		}
 		forms = new FormPages(getContainer(), session);
 		forms.addTo((control, title) -> setPageText(addPage(control), title));
+		forms.onChoose(selection::changed);
+	}
+
+	private EObject chosenOnForm() {
+		return forms == null || getActivePage() < 0 ? null : forms.chosen(getControl(getActivePage()));
+	}
+
+	@Override
+	protected void pageChange(int index) {
+		super.pageChange(index);
+		selection.changed();
 	}
 
 	/** Reads the file again and begins anew with it; what was undone or not saved is gone. */

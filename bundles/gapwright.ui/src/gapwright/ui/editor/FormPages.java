@@ -51,4 +51,19 @@ final class FormPages {
 		return -1;
 	}
 
+
+	/** @param listener called when a page has chosen another element */
+	void onChoose(Runnable listener) {
+		windings.onChoose(listener);
+		points.onChoose(listener);
+		materials.onChoose(listener);
+	}
+
+	/** What a page has chosen; null when the control is none of these. */
+	EObject chosen(Control page) {
+		if (page == windings) {
+			return windings.chosen();
+		}
+		return page == points ? points.chosen() : page == materials ? materials.chosen() : null;
+	}
 }

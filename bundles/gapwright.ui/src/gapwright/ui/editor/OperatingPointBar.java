@@ -70,7 +70,7 @@ final class OperatingPointBar {
 		if (!List.of(labels).equals(List.of(points.getItems()))) {
 			points.setItems(labels);
 		}
-		int index = all.indexOf(session.operatingPoint());
+		int index = session.operatingPoint() == null ? -1 : all.indexOf(session.operatingPoint());
 		if (index >= 0 && index != points.getSelectionIndex()) {
 			points.select(index);
 		}

@@ -1,5 +1,6 @@
 package gapwright.ui.fields;
 
+import java.util.ArrayList;
 import java.util.List;
 
 import org.eclipse.emf.ecore.EObject;
@@ -17,7 +18,7 @@ final class ChoiceField implements FeatureField {
 	private final EditRunner runner;
 	private final Combo combo;
 	private Runnable afterProblem = () -> { };
-	private List<?> offered = List.of();
+	private List<?> offered = new ArrayList<>();
 	private String problem;
 	private EObject element;
 
@@ -50,7 +51,7 @@ final class ChoiceField implements FeatureField {
 
 	@Override
 	public void refresh() {
-		offered = element == null ? List.of() : choices.values().apply(element);
+		offered = element == null ? new ArrayList<>() : choices.values().apply(element);
 		String[] labels = offered.stream().map(choices.label()).toArray(String[]::new);
 		if (!List.of(labels).equals(List.of(combo.getItems()))) {
 			combo.setItems(labels);

@@ -96,6 +96,9 @@ public final class ElementRows {
 				GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
 				data.widthHint = 90;
 				field.control().setLayoutData(data);
+				if (field.control() instanceof Button tick) {
+					tick.setText("");
+				}
 				field.onProblem(this::mirrorProblem);
 				fields.add(field);
 			}

@@ -23,7 +23,7 @@ import gapwright.ui.session.DesignSession;
  * A page of the editor with the elements of one kind on the left and the chosen one's fields on the right. Everything
  * goes through the design's one history; whatever changes elsewhere shows here after each of its steps.
  */
-abstract class MasterDetailPage extends Composite {
+public abstract class MasterDetailPage extends Composite {
 
 	private final DesignSession session;
 	private final MasterList list;
@@ -31,6 +31,8 @@ abstract class MasterDetailPage extends Composite {
 	private final Composite details;
 	private final Composite emptiness;
 	private final Runnable refresher = this::refreshLater;
+	private Runnable onChoose = () -> { };
+	private EObject told;
 	private boolean pending;
 
 	MasterDetailPage(Composite parent, DesignSession session, String title, String whenEmpty) {
@@ -97,8 +99,14 @@ abstract class MasterDetailPage extends Composite {
 		return session;
 	}
 
-	final EObject chosen() {
+	/** The element shown on the right; null when there is none. */
+	public final EObject chosen() {
 		return list.chosen();
+	}
+
+	/** @param listener called when another element is chosen */
+	public final void onChoose(Runnable listener) {
+		onChoose = listener;
 	}
 
 	/** For fields, which show a refusal beside themselves. */
@@ -131,6 +139,10 @@ abstract class MasterDetailPage extends Composite {
 		if (layout.topControl != top) {
 			layout.topControl = top;
 			FormLayouts.relayout(emptiness.getParent());
+		}
+		if (told != element) {
+			told = element;
+			onChoose.run();
 		}
 	}
 

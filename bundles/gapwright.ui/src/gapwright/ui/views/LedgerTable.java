@@ -5,7 +5,6 @@ import java.util.Arrays;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
-import java.util.function.BiConsumer;
 import java.util.function.Consumer;
 import java.util.stream.IntStream;
 
@@ -22,7 +21,8 @@ import org.eclipse.swt.widgets.TableItem;
 
 /**
  * A read-only table of figures: sorts by a click on a heading, copies, remembers its column widths and keeps its
- * selection by row identity. Rows are shown on demand, so that thousands of legs cost what is on the screen.
+ * selection by row identity. New figures go into the rows that are there, cell by cell where they differ.
+ * (A table that asks for its rows when they come into sight crashes GTK when the theme is changed.)
  *
  * @param <R> a row; equal rows count as the same one, whatever their figures
  */
@@ -34,19 +34,17 @@ final class LedgerTable<R> {
 	private final IDialogSettings settings;
 	private List<R> design = List.of();
 	private List<R> rows = List.of();
-	private BiConsumer<TableItem, R> decorator = (item, row) -> { };
 	private Consumer<List<R>> onSelect = selected -> { };
 
 	LedgerTable(Composite parent, List<LedgerColumn<R>> columns, IDialogSettings settings) {
 		this.columns = List.copyOf(columns);
 		this.settings = settings;
-		table = new Table(parent, SWT.VIRTUAL | SWT.MULTI | SWT.FULL_SELECTION);
+		table = new Table(parent, SWT.MULTI | SWT.FULL_SELECTION);
 		table.setHeaderVisible(true);
 		table.setLinesVisible(true);
 		for (LedgerColumn<R> column : columns) {
 			create(column);
 		}
-		table.addListener(SWT.SetData, event -> fill((TableItem) event.item));
 		table.addListener(SWT.Selection, event -> onSelect.accept(selection()));
 		table.addListener(SWT.KeyDown, this::key);
 	}
@@ -86,11 +84,6 @@ final class LedgerTable<R> {
 		}
 	}
 
-	/** @param next called for each row shown, after its texts are set */
-	void decorate(BiConsumer<TableItem, R> next) {
-		decorator = next;
-	}
-
 	void onSelect(Consumer<List<R>> listener) {
 		onSelect = listener;
 	}
@@ -100,20 +93,29 @@ final class LedgerTable<R> {
 		List<R> selected = selection();
 		design = List.copyOf(next);
 		rows = order.sorted(design);
-		table.setItemCount(rows.size());
-		table.clearAll();
+		table.setRedraw(false);
+		if (table.getItemCount() > rows.size()) {
+			table.remove(rows.size(), table.getItemCount() - 1);
+		}
+		for (int index = 0; index < rows.size(); index++) {
+			fill(index < table.getItemCount() ? table.getItem(index) : new TableItem(table, SWT.NONE), rows.get(index));
+		}
+		table.setRedraw(true);
+		table.redraw();
 		select(selected);
 	}
 
-	private void fill(TableItem item) {
-		int index = table.indexOf(item);
-		if (index < rows.size()) {
-			R row = rows.get(index);
-			for (int k = 0; k < columns.size(); k++) {
-				item.setText(k, columns.get(k).shown().apply(row));
+	/** The texts last shown are kept beside the item: asking the widget costs more than reckoning the leg did. */
+	private void fill(TableItem item, R row) {
+		String[] shown = item.getData() instanceof String[] before ? before : new String[columns.size()];
+		for (int k = 0; k < columns.size(); k++) {
+			String text = columns.get(k).shown().apply(row);
+			if (!text.equals(shown[k])) {
+				shown[k] = text;
+				item.setText(k, text);
 			}
-			decorator.accept(item, row);
 		}
+		item.setData(shown);
 	}
 
 	/** In the order shown. */
