@@ -16,6 +16,9 @@ final class Workbench {
 	/** Long enough for any machine; reached only when something hangs. */
 	private static final int MINUTES = 5;
 
+	/** Where the director keeps its own data: it notes that at its first use, whatever it is used for. */
+	private static final String DIRECTORS_OWN = "eclipse.p2.data.area=";
+
 	private final Path folder;
 	private final Path bundles;
 
@@ -109,7 +112,8 @@ final class Workbench {
 			}
 		}
 		Files.readAllLines(folder.resolve("artifacts.xml")).stream().filter(l -> l.contains("<artifact ")).forEach(l -> all.add("artefact " + l.strip()));
-		Files.readAllLines(folder.resolve("configuration/config.ini")).stream().filter(l -> !l.startsWith("#")).forEach(l -> all.add("setting " + l));
+		Files.readAllLines(folder.resolve("configuration/config.ini")).stream().filter(l -> !l.startsWith("#") && !l.startsWith(DIRECTORS_OWN))
+				.forEach(l -> all.add("setting " + l));
 		roots().forEach(root -> all.add("root " + root));
 		return all;
 	}
