@@ -36,7 +36,7 @@ class ArrowsTest {
 			Map.entry("gapwright.ui",
 					Set.of("gapwright.physics", "gapwright.model", "gapwright.model.edit", "gapwright.library",
 							"gapwright.study", "gapwright.report", "gapwright.workspace")),
-			Map.entry("gapwright.help", Set.of()));
+			Map.entry("gapwright.help", Set.of()), Map.entry("gapwright.help.viewer", Set.of("gapwright.help")));
 
 	private static final Pattern REQUIRED = Pattern.compile("[:,\\s](gapwright\\.[a-z.]+)[;,\\s]");
 	private static final Pattern IMPORT = Pattern.compile("^import (?:static )?([\\w.]+)");

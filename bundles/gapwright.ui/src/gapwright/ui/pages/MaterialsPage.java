@@ -13,6 +13,7 @@ import org.eclipse.emf.ecore.EObject;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.ui.PlatformUI;
 
 import gapwright.model.Design;
 import gapwright.model.Material;
@@ -34,6 +35,7 @@ public final class MaterialsPage extends MasterDetailPage {
 
 	public MaterialsPage(Composite parent, DesignSession session) {
 		super(parent, session, "Materials", "This design has no material yet. Take one from the library or add your own.");
+		PlatformUI.getWorkbench().getHelpSystem().setHelp(this, "gapwright.help.materialsPage");
 		start();
 	}
 

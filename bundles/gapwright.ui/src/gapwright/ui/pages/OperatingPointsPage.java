@@ -9,6 +9,7 @@ import java.util.List;
 
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.ui.PlatformUI;
 
 import gapwright.model.Design;
 import gapwright.model.OperatingPoint;
@@ -27,6 +28,7 @@ public final class OperatingPointsPage extends MasterDetailPage {
 
 	public OperatingPointsPage(Composite parent, DesignSession session) {
 		super(parent, session, "Operating points", "This design has no operating point yet, so nothing is computed. Add one.");
+		PlatformUI.getWorkbench().getHelpSystem().setHelp(this, "gapwright.help.operatingPointsPage");
 		start();
 	}
 

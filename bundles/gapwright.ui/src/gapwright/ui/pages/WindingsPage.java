@@ -14,6 +14,7 @@ import org.eclipse.emf.ecore.EObject;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.ui.PlatformUI;
 
 import gapwright.model.Coil;
 import gapwright.model.Design;
@@ -36,6 +37,7 @@ public final class WindingsPage extends MasterDetailPage {
 
 	public WindingsPage(Composite parent, DesignSession session) {
 		super(parent, session, "Windings", "This design has no winding yet. Add one here, or draw a coil on the canvas.");
+		PlatformUI.getWorkbench().getHelpSystem().setHelp(this, "gapwright.help.windingsPage");
 		start();
 	}
 

@@ -6,6 +6,7 @@ import org.eclipse.emf.ecore.EObject;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.ui.PlatformUI;
 
 import gapwright.model.Coil;
 import gapwright.model.Leg;
@@ -25,6 +26,7 @@ public final class LegLedger extends DesignView {
 
 	@Override
 	void createContent(Composite parent) {
+		PlatformUI.getWorkbench().getHelpSystem().setHelp(parent, "gapwright.help.legLedger");
 		table = new LedgerTable<>(parent, LegColumns.all(), LedgerSettings.of("legs"));
 		table.control().setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
 		table.onSelect(rows -> publish(rows.stream().map(LegRow::leg).toList()));

@@ -7,6 +7,7 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.SashForm;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.ui.PlatformUI;
 
 import gapwright.model.Winding;
 import gapwright.ui.session.DesignSession;
@@ -26,6 +27,7 @@ public final class WindingLedger extends DesignView {
 
 	@Override
 	void createContent(Composite parent) {
+		PlatformUI.getWorkbench().getHelpSystem().setHelp(parent, "gapwright.help.windingLedger");
 		SashForm sash = new SashForm(parent, SWT.HORIZONTAL | SWT.SMOOTH);
 		sash.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
 		table = new LedgerTable<>(sash, WindingColumns.all(), LedgerSettings.of("windings"));
