@@ -13,6 +13,8 @@ import java.nio.file.attribute.PosixFileAttributeView;
 /** Replaces a file by writing beside it, flushing to the disk, and renaming. */
 public final class AtomicFile {
 
+	private static final int MOST_LINKS = 40;
+
 	private AtomicFile() {
 	}
 
@@ -22,12 +24,17 @@ public final class AtomicFile {
 	 * @throws IOException when it could not be written; the old file is then as it was and nothing is left beside it
 	 */
 	public static void write(Path file, byte[] content) throws IOException {
-		Path target = Files.exists(file) ? file.toRealPath() : file.toAbsolutePath();
+		Path target = target(file);
 		if (Files.exists(target) && !Files.isWritable(target)) {
 			throw new FileSystemException(target.toString(), null, "the file is read-only");
 		}
 		Path folder = target.getParent();
-		Path beside = Files.createTempFile(folder, "." + target.getFileName() + ".", ".saving");
+		Path beside;
+		try {
+			beside = Files.createTempFile(folder, "." + target.getFileName() + ".", ".saving");
+		} catch (IOException e) {
+			throw new FileSystemException(target.toString(), null, "cannot write in its folder: " + e.getMessage());
+		}
 		try {
 			try (FileChannel channel = FileChannel.open(beside, StandardOpenOption.WRITE)) {
 				ByteBuffer rest = ByteBuffer.wrap(content);
@@ -43,6 +50,21 @@ public final class AtomicFile {
 			throw e;
 		}
 		flushFolder(folder);
+	}
+
+	/** Where a link leads, even when nothing is there yet. */
+	private static Path target(Path file) throws IOException {
+		Path target = file.toAbsolutePath();
+		for (int links = 0; Files.isSymbolicLink(target); links++) {
+			if (links == MOST_LINKS) {
+				throw new FileSystemException(file.toString(), null, "the symbolic links lead round in a circle");
+			}
+			target = target.resolveSibling(Files.readSymbolicLink(target));
+		}
+		if (Files.isDirectory(target)) {
+			throw new FileSystemException(target.toString(), null, "is a folder");
+		}
+		return target;
 	}
 
 	private static void copyPermissions(Path from, Path to) throws IOException {

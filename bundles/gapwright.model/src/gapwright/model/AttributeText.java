@@ -18,6 +18,11 @@ public final class AttributeText {
 	private static final Pattern NUMBER = Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d{1,3})?");
 	private static final Pattern WHOLE = Pattern.compile("[+-]?\\d{1,9}");
 
+	/** A longer text is no number; reading its digits would only cost time. */
+	private static final int MOST_DIGITS = 100;
+	/** What to do instead of half a turn. */
+	public static final String HALF_TURNS = "half turns exist only on multi-leg cores: place the coil on the leg it encloses";
+
 	private AttributeText() {
 	}
 
@@ -28,18 +33,20 @@ public final class AttributeText {
 			return choices.getEEnumLiteralByLiteral(text) != null ? null : "no such choice, allowed are "
 					+ choices.getELiterals().stream().map(EEnumLiteral::getLiteral).collect(Collectors.joining(", "));
 		}
+		if (type == EcorePackage.Literals.ESTRING) {
+			return null;
+		}
+		if (text.length() > MOST_DIGITS && (type == EcorePackage.Literals.EDOUBLE || type == EcorePackage.Literals.EINT)) {
+			return "too long for a number";
+		}
 		if (type == EcorePackage.Literals.EDOUBLE) {
 			return numberProblem(text);
 		}
 		if (type == EcorePackage.Literals.EINT) {
-			return WHOLE.matcher(text).matches() ? null : NUMBER.matcher(text).matches()
-					? "a whole number is needed, e.g. 12" : "not a whole number, e.g. 12";
+			return WHOLE.matcher(text).matches() ? null : wholeProblem(attribute, text);
 		}
 		if (type == EcorePackage.Literals.EBOOLEAN) {
 			return text.equals("true") || text.equals("false") ? null : "allowed are true, false";
-		}
-		if (type == EcorePackage.Literals.ESTRING) {
-			return null;
 		}
 		try {
 			EcoreUtil.createFromString(type, text);
@@ -47,6 +54,28 @@ public final class AttributeText {
 		} catch (QuantityFormatException e) {
 			return e.problem();
 		}
+	}
+
+	/** @return why XML cannot hold a text, or null when it can; pasted text sometimes carries control characters */
+	public static String unstorable(String text) {
+		return text.codePoints().filter(c -> !storable(c)).mapToObj(c -> String
+				.format("the character U+%04X cannot be stored in a file, delete it", c)).findFirst().orElse(null);
+	}
+
+	/** Source: XML 1.0, production Char. */
+	private static boolean storable(int c) {
+		return c == '\t' || c == '\n' || c == '\r' || c >= 0x20 && c <= 0xD7FF || c >= 0xE000 && c <= 0xFFFD
+				|| c >= 0x10000;
+	}
+
+	private static String wholeProblem(EAttribute attribute, String text) {
+		if (!NUMBER.matcher(text).matches()) {
+			return "not a whole number, e.g. 12";
+		}
+		if (text.matches("[+-]?\\d+")) {
+			return "out of the range of whole numbers";
+		}
+		return "a whole number is needed, e.g. 12" + (attribute == GapwrightPackage.Literals.COIL__TURNS ? "; " + HALF_TURNS : "");
 	}
 
 	private static String numberProblem(String text) {

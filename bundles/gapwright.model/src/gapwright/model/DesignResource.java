@@ -23,7 +23,7 @@ import org.eclipse.emf.ecore.xmi.impl.XMIResourceImpl;
 public final class DesignResource extends XMIResourceImpl {
 
 	/** A larger file is no design; refusing it is kinder than running out of memory. */
-	private static final int MOST_BYTES = 256 << 20;
+	private static final int MOST_BYTES = 64 << 20;
 
 	public DesignResource(URI uri) {
 		super(uri);
@@ -35,12 +35,22 @@ public final class DesignResource extends XMIResourceImpl {
 		return getContents().isEmpty() ? null : (Design) getContents().get(0);
 	}
 
+	/** Loads all or nothing: after a failure the resource is as if it had never been loaded. */
 	@Override
 	public void doLoad(InputStream input, Map<?, ?> options) throws IOException {
-		String name = getURI() == null ? "design" : getURI().lastSegment();
+		try {
+			read(input, options);
+		} catch (IOException | RuntimeException e) {
+			unload();
+			throw e;
+		}
+	}
+
+	private void read(InputStream input, Map<?, ?> options) throws IOException {
+		String name = getURI() == null ? "design" : URI.decode(getURI().lastSegment());
 		byte[] content = input.readNBytes(MOST_BYTES + 1);
 		List<ReadProblem> problems = content.length > MOST_BYTES
-				? List.of(new ReadProblem(name, 0, "", "", "", "larger than 256 MiB, not a design"))
+				? List.of(new ReadProblem(name, 0, "", "", "", "larger than 64 MiB, not a design"))
 				: FileChecker.check(name, content);
 		if (!problems.isEmpty()) {
 			throw new UnreadableDesignException(problems);
@@ -72,7 +82,7 @@ public final class DesignResource extends XMIResourceImpl {
 	@Override
 	public void save(Map<?, ?> options) throws IOException {
 		if (getURI().isFile()) {
-			AtomicFile.write(Path.of(getURI().toFileString()), DesignWriter.bytes(this));
+			AtomicFile.write(Path.of(getURI().toFileString()), DesignWriter.content(this));
 			setModified(false);
 		} else {
 			super.save(options);
@@ -81,6 +91,9 @@ public final class DesignResource extends XMIResourceImpl {
 
 	@Override
 	public void doSave(OutputStream output, Map<?, ?> options) throws IOException {
+		if (design() != null) {
+			Storable.check(design());
+		}
 		Map<Object, Object> ours = new HashMap<>(options == null ? Map.of() : options);
 		ours.put(XMLResource.OPTION_SCHEMA_LOCATION, false);
 		super.doSave(output, ours);

@@ -2,6 +2,7 @@ package gapwright.model;
 
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.util.Map;
 
@@ -14,23 +15,31 @@ public final class DesignWriter {
 	private DesignWriter() {
 	}
 
-	/** @return the file's content; a design that is in no resource is left so */
+	/**
+	 * @return the file's content; a design that is in no resource is left so
+	 * @throws UncheckedIOException naming element and feature when a file cannot hold the design
+	 */
 	public static byte[] bytes(Design design) {
-		if (design.eResource() instanceof DesignResource resource) {
-			return bytes(resource);
+		try {
+			return content(design);
+		} catch (IOException e) {
+			throw new UncheckedIOException(e.getMessage(), e);
 		}
-		DesignResource resource = new DesignResource(URI.createURI("design.gapwright"));
-		resource.getContents().add(EcoreUtil.copy(design));
-		return bytes(resource);
 	}
 
-	static byte[] bytes(DesignResource resource) {
-		ByteArrayOutputStream output = new ByteArrayOutputStream();
-		try {
-			resource.doSave(output, Map.of());
-		} catch (IOException e) {
-			throw new IllegalStateException(e);
+	private static byte[] content(Design design) throws IOException {
+		if (design.eResource() instanceof DesignResource resource) {
+			return content(resource);
 		}
+		Storable.check(design);
+		DesignResource resource = new DesignResource(URI.createURI("design.gapwright"));
+		resource.getContents().add(EcoreUtil.copy(design));
+		return content(resource);
+	}
+
+	static byte[] content(DesignResource resource) throws IOException {
+		ByteArrayOutputStream output = new ByteArrayOutputStream();
+		resource.doSave(output, Map.of());
 		return output.toByteArray();
 	}
 
@@ -40,6 +49,6 @@ public final class DesignWriter {
 	 * @throws IOException when it could not be written; the old file is then as it was
 	 */
 	public static void write(Design design, Path file) throws IOException {
-		AtomicFile.write(file, bytes(design));
+		AtomicFile.write(file, content(design));
 	}
 }

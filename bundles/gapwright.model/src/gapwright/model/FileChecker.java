@@ -1,6 +1,10 @@
 package gapwright.model;
 
 import java.io.ByteArrayInputStream;
+import java.io.StringReader;
+import java.nio.ByteBuffer;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
@@ -10,6 +14,8 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 
 import javax.xml.stream.XMLInputFactory;
 import javax.xml.stream.XMLStreamConstants;
@@ -31,6 +37,8 @@ final class FileChecker {
 	private static final String XMI = "http://www.omg.org/XMI";
 	private static final String XSI = "http://www.w3.org/2001/XMLSchema-instance";
 	private static final String FAMILY = "urn:gapwright:design:";
+	private static final String ELSEWHERE = "a design must not refer to other files";
+	private static final Pattern WORDLESS = Pattern.compile("http://www\\.w3\\.org/\\S*#(\\w+)\\?(\\S*)");
 	/** A file with more wrong than this is no design; the rest would only hide the cause. */
 	private static final int MOST_PROBLEMS = 100;
 
@@ -60,12 +68,29 @@ final class FileChecker {
 		if (content.length == 0) {
 			checker.add(0, "", "", "", "the file is empty, expected a design");
 		} else {
-			checker.read(content);
+			String text = checker.decode(content);
+			if (text != null) {
+				checker.read(text);
+			}
 		}
 		return checker.problems;
 	}
 
-	private void read(byte[] content) {
+	/** @return the text without a byte order mark, or null when it is none in UTF-8 */
+	private String decode(byte[] content) {
+		ByteBuffer bytes = ByteBuffer.wrap(content);
+		try {
+			String text = StandardCharsets.UTF_8.newDecoder().decode(bytes).toString();
+			return text.startsWith("\uFEFF") ? text.substring(1) : text;
+		} catch (CharacterCodingException e) {
+			String before = new String(content, 0, bytes.position(), StandardCharsets.UTF_8);
+			add(1 + (int) before.chars().filter(c -> c == '\n').count(), "", "", "",
+					"not text in UTF-8, so not a design or a damaged one");
+			return null;
+		}
+	}
+
+	private void read(String text) {
 		XMLInputFactory factory = XMLInputFactory.newDefaultFactory();
 		factory.setProperty(XMLInputFactory.IS_NAMESPACE_AWARE, true);
 		factory.setProperty(XMLInputFactory.IS_SUPPORTING_EXTERNAL_ENTITIES, false);
@@ -75,7 +100,12 @@ final class FileChecker {
 			// whatever matters arrives as an exception; the parser would print it as well
 		});
 		try {
-			XMLStreamReader xml = factory.createXMLStreamReader(new ByteArrayInputStream(content));
+			XMLStreamReader xml = factory.createXMLStreamReader(new StringReader(text));
+			String encoding = xml.getCharacterEncodingScheme();
+			if (encoding != null && !encoding.equalsIgnoreCase("UTF-8")) {
+				add(1, "", "", "encoding=\"" + clip(encoding) + "\"", "a design is written in UTF-8");
+				return;
+			}
 			while (xml.hasNext() && problems.size() < MOST_PROBLEMS) {
 				if (!event(xml, xml.next())) {
 					return;
@@ -86,7 +116,7 @@ final class FileChecker {
 			add(line, "", "", "", "truncated or malformed XML: " + plain(e.getMessage()));
 			return;
 		} catch (RuntimeException e) {
-			// the parser's own failure on bytes that are no text
+			// the parser's own failure
 			add(0, "", "", "", "not readable as XML: " + plain(String.valueOf(e.getMessage())));
 			return;
 		}
@@ -138,6 +168,11 @@ final class FileChecker {
 	private boolean child(XMLStreamReader xml, int line) {
 		Frame parent = open.peek();
 		String tag = xml.getLocalName();
+		if (xml.getNamespaceURI() != null && !xml.getNamespaceURI().isEmpty()) {
+			add(line, parent.name(), "", tag,
+					"elements inside a design are written without a namespace, this one is in " + clip(xml.getNamespaceURI()));
+			return skip(xml);
+		}
 		EStructuralFeature feature = parent.type().getEStructuralFeature(tag);
 		if (!(feature instanceof EReference reference) || !reference.isContainment()) {
 			add(line, parent.name(), "", tag, feature == null
@@ -187,7 +222,13 @@ final class FileChecker {
 		}
 		for (int i = 0; i < xml.getAttributeCount(); i++) {
 			String namespace = xml.getAttributeNamespace(i);
-			if (XSI.equals(namespace) || XMI.equals(namespace) && xml.getAttributeLocalName(i).equals("version")) {
+			String own = xml.getAttributeLocalName(i);
+			if (XSI.equals(namespace) && own.equals("type") && !open.isEmpty()
+					|| XMI.equals(namespace) && own.equals("version") && open.isEmpty()) {
+				continue;
+			}
+			if (XSI.equals(namespace) && own.toLowerCase(Locale.ROOT).endsWith("schemalocation")) {
+				add(line, name, "xsi:" + own, clip(xml.getAttributeValue(i)), ELSEWHERE);
 				continue;
 			}
 			attribute(type, name, xml.getAttributeLocalName(i), xml.getAttributeValue(i),
@@ -207,8 +248,9 @@ final class FileChecker {
 			add(line, name, "id", id == null ? "" : id, "an id is needed, short and unique in the design");
 			return;
 		}
-		if (id.chars().anyMatch(Character::isWhitespace) || id.contains("#") || id.startsWith("/")) {
-			add(line, name, "id", id, "an id must not contain blanks or #, nor begin with /");
+		String wrong = Ids.problem(id);
+		if (wrong != null) {
+			add(line, name, "id", clip(id), wrong);
 		}
 		Known before = known.putIfAbsent(id, new Known(type, line));
 		if (before != null) {
@@ -218,7 +260,7 @@ final class FileChecker {
 
 	private void attribute(EClass type, String element, String name, String value, boolean plainName, int line) {
 		if (name.equals("href")) {
-			add(line, element, name, clip(value), "a design must not refer to other files");
+			add(line, element, name, clip(value), ELSEWHERE);
 			return;
 		}
 		EStructuralFeature feature = plainName ? type.getEStructuralFeature(name) : null;
@@ -242,7 +284,7 @@ final class FileChecker {
 			if (target == null) {
 				add(reference.line(), reference.element(), reference.feature().getName(), clip(reference.id()),
 						"there is no " + words(expected.getName()) + " with this id" + (reference.id().contains("#")
-								? "; a design must not refer to other files"
+								? "; " + ELSEWHERE
 								: ""));
 			} else if (!expected.isSuperTypeOf(target.type())) {
 				add(reference.line(), reference.element(), reference.feature().getName(), reference.id(),
@@ -275,7 +317,18 @@ final class FileChecker {
 
 	private static String plain(String message) {
 		int at = message.indexOf("Message: ");
-		return clip((at < 0 ? message : message.substring(at + 9)).strip());
+		String plain = (at < 0 ? message : message.substring(at + 9)).strip();
+		Matcher wordless = WORDLESS.matcher(plain);
+		return wordless.find() ? inWords(wordless.group(1), wordless.group(2).split("&")) : clip(plain);
+	}
+
+	/** The JDK's reader has no words for its errors with names and namespaces; it prints an address instead. */
+	private static String inWords(String error, String[] names) {
+		String last = clip(names[error.equals("ElementPrefixUnbound") ? 0 : names.length - 1]);
+		return error.endsWith("NotUnique")
+				? "the attribute " + clip(names[Math.min(1, names.length - 1)]) + " is given twice in one element"
+				: error.endsWith("PrefixUnbound") ? "the prefix " + last + " is not declared by an xmlns:" + last
+						: "the name " + last + " is not allowed (" + words(error) + ")";
 	}
 
 	private static String clip(String text) {

@@ -9,6 +9,8 @@ import org.eclipse.emf.ecore.EObject;
 /** Ids of elements: short, readable, unique in their design. */
 public final class Ids {
 
+	private static final int LONGEST = 200;
+
 	private Ids() {
 	}
 
@@ -24,6 +26,19 @@ public final class Ids {
 			number++;
 		}
 		return stem + "-" + number;
+	}
+
+	/** @return why a text is no id, or null when it is one: the characters that have a meaning in references are out */
+	public static String problem(String id) {
+		if (id.isBlank()) {
+			return "an id is needed, short and unique in the design";
+		}
+		boolean allowed = id.chars().noneMatch(c -> Character.isWhitespace(c) || Character.isSpaceChar(c)
+				|| Character.isISOControl(c) || c == '#' || c == ':') && !id.startsWith("/");
+		if (!allowed) {
+			return "an id must not contain blanks, # or :, nor begin with /";
+		}
+		return id.length() > LONGEST ? "an id has at most " + LONGEST + " characters" : null;
 	}
 
 	/** @return every id in the design */

@@ -2,8 +2,10 @@ package gapwright.model;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.net.InetAddress;
 import java.net.ServerSocket;
@@ -11,8 +13,10 @@ import java.net.SocketTimeoutException;
 import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
 import java.util.Random;
 
+import org.eclipse.emf.common.util.URI;
 import org.junit.jupiter.api.Test;
 
 /** What is wrong with a file is said with file, element, attribute, what was found and what would do. */
@@ -86,7 +90,8 @@ class ReadingTest {
 	@Test
 	void aFractionOfATurn() {
 		refuses("turns=\"20\"", "turns=\"20.5\"",
-				"small.gapwright:coil: turns = '20.5': a whole number is needed, e.g. 12 (line 14)");
+				"small.gapwright:coil: turns = '20.5': a whole number is needed, e.g. 12; half turns exist only on"
+						+ " multi-leg cores: place the coil on the leg it encloses (line 14)");
 	}
 
 	@Test
@@ -135,7 +140,7 @@ class ReadingTest {
 	@Test
 	void aFileCutOffAnywhereIsRefusedAndNeverHalfLoaded() {
 		byte[] whole = DesignText.GOOD.getBytes(StandardCharsets.UTF_8);
-		for (int length = 0; length < whole.length - 2; length++) {
+		for (int length = 0; length < whole.length - 1; length++) {
 			byte[] cut = Arrays.copyOf(whole, length);
 			assertFalse(DesignText.problems(cut).isEmpty(), "read after " + length + " bytes");
 		}
@@ -145,9 +150,14 @@ class ReadingTest {
 	void bytesThatAreNoTextAreRefused() {
 		byte[] noise = new byte[4096];
 		new Random(7).nextBytes(noise);
-		assertEquals(1, DesignText.problems(noise).size());
-		byte[] utf16 = DesignText.GOOD.getBytes(StandardCharsets.UTF_16LE);
-		assertFalse(DesignText.problems(utf16).isEmpty());
+		List<String> notText = List.of("small.gapwright: not text in UTF-8, so not a design or a damaged one (line 1)");
+		assertEquals(notText, DesignText.problems(noise));
+		assertEquals(notText, DesignText.problems(DesignText.GOOD.getBytes(StandardCharsets.UTF_16)));
+		assertEquals(List.of("small.gapwright: not text in UTF-8, so not a design or a damaged one (line 5)"),
+				DesignText.problems(DesignText.GOOD.getBytes(StandardCharsets.ISO_8859_1)));
+		assertEquals(List.of("small.gapwright: 'encoding=\"ISO-8859-1\"': a design is written in UTF-8 (line 1)"),
+				DesignText.problems(DesignText.GOOD.replace("UTF-8", "ISO-8859-1")));
+		assertEquals(List.of(), DesignText.problems("\uFEFF" + DesignText.GOOD));
 	}
 
 	/** A document type, an external entity and a schema location that point to a server here: nobody may call it. */
@@ -169,13 +179,9 @@ class ReadingTest {
 			}
 			String located = DesignText.GOOD.replace(" name=\"small\"",
 					" xsi:schemaLocation=\"urn:gapwright:design:1 " + address + "\" name=\"small\"");
-			assertEquals(List.of(), DesignText.problems(located));
-			try {
-				server.accept().close();
-				throw new AssertionError("something was fetched");
-			} catch (SocketTimeoutException e) {
-				assertTrue(true);
-			}
+			assertEquals(List.of("small.gapwright:Design: xsi:schemaLocation = 'urn:gapwright:design:1 " + address
+					+ "': a design must not refer to other files (line 2)"), DesignText.problems(located));
+			assertThrows(SocketTimeoutException.class, () -> server.accept().close(), "something was fetched");
 		}
 	}
 
@@ -201,5 +207,107 @@ class ReadingTest {
 		String many = "<joints x=\"1\" y=\"2\"/>\n".repeat(500);
 		List<String> problems = DesignText.problems(DesignText.GOOD.replace("  <joints id=\"a\"", many + "  <joints id=\"a\""));
 		assertEquals(100, problems.size());
+	}
+
+	@Test
+	void aReferenceIntoAnotherFile() {
+		refuses("leg=\"wound\"", "leg=\"other.gapwright#wound\"",
+				"small.gapwright:coil: leg = 'other.gapwright#wound': there is no leg with this id; a design must not"
+						+ " refer to other files (line 14)");
+	}
+
+	@Test
+	void anElementOfAnotherFile() {
+		refuses("<gaps id=\"gap\" length=\"0.80 mm\"/>", "<gaps href=\"other.gapwright#gap\"/>",
+				"small.gapwright:wound/Gap: id = '': an id is needed, short and unique in the design (line 10)",
+				"small.gapwright:wound/Gap: href = 'other.gapwright#gap': a design must not refer to other files (line 10)");
+	}
+
+	@Test
+	void anIdThatReferencesWouldMisread() {
+		for (String id : new String[] { "my coil", "a:b", "a#b", "/coil", "c\u00A0d" }) {
+			refuses("<coils id=\"coil\"", "<coils id=\"" + id + "\"", "small.gapwright:" + id + ": id = '" + id
+					+ "': an id must not contain blanks, # or :, nor begin with / (line 14)");
+		}
+	}
+
+	@Test
+	void anElementOrAttributeOfAForeignNamespace() {
+		refuses("<gaps id", "<x:gaps xmlns:x=\"urn:x\" id",
+				"small.gapwright:wound: 'gaps': elements inside a design are written without a namespace, this one is in"
+						+ " urn:x (line 10)");
+		refuses("<gaps id", "<gaps xmlns:x=\"urn:x\" x:length=\"1 mm\" id",
+				"small.gapwright:gap: length = '1 mm': no such attribute in a gap, allowed are id, name, length, pieces,"
+						+ " fringing, windowHeight, position (line 10)");
+	}
+
+	@Test
+	void anAttributeOrSingleElementGivenTwice() {
+		refuses("turns=\"20\"", "turns=\"20\" turns=\"20\"",
+				"small.gapwright: truncated or malformed XML: the attribute turns is given twice in one element (line 14)");
+		refuses("    <saturations", "    <curve xsi:type=\"gapwright:LinearCurve\" relativePermeability=\"2\"/>\n    <saturations",
+				"small.gapwright:ferrite: 'curve': given twice, allowed once (line 5)");
+	}
+
+	@Test
+	void aPrefixThatNobodyDeclared() {
+		refuses("<gaps id", "<x:gaps id",
+				"small.gapwright: truncated or malformed XML: the prefix x is not declared by an xmlns:x (line 10)");
+	}
+
+	@Test
+	void aDriveWithoutItsKind() {
+		refuses(" xsi:type=\"gapwright:CurrentDrive\"", "",
+				"small.gapwright:full: xsi:type = '': missing, allowed are gapwright:CurrentDrive, gapwright:VoltageDrive (line 17)");
+	}
+
+	@Test
+	void textBetweenElements() {
+		refuses("  <windings id=\"main\">", "  wire <windings id=\"main\">",
+				"small.gapwright:Design: 'wire': text between elements is not allowed (line 13)");
+	}
+
+	@Test
+	void numbersOutOfRange() {
+		refuses("turns=\"20\"", "turns=\"20000000000\"",
+				"small.gapwright:coil: turns = '20000000000': out of the range of whole numbers (line 14)");
+		refuses("initialPermeability=\"2300.0\"", "initialPermeability=\"1e999\"",
+				"small.gapwright:ferrite/KneeCurve: initialPermeability = '1e999': out of the range of numbers (line 4)");
+		refuses("initialPermeability=\"2300.0\"", "initialPermeability=\"NaN\"",
+				"small.gapwright:ferrite/KneeCurve: initialPermeability = 'NaN': not a number, e.g. 0.95 (line 4)");
+		refuses("initialPermeability=\"2300.0\"", "initialPermeability=\"" + "1".repeat(500_000) + "\"",
+				"small.gapwright:ferrite/KneeCurve: initialPermeability = '" + "1".repeat(200)
+						+ "…': too long for a number (line 4)");
+	}
+
+	@Test
+	void aResourceThatFailedToLoadIsAsIfNeverLoaded() throws IOException {
+		DesignResource resource = new DesignResource(URI.createURI("my%20design.gapwright"));
+		byte[] broken = DesignText.GOOD.replace("turns=\"20\"", "turns=\"x\"").getBytes(StandardCharsets.UTF_8);
+		UnreadableDesignException refused = assertThrows(UnreadableDesignException.class,
+				() -> resource.load(new ByteArrayInputStream(broken), Map.of()));
+		assertEquals("my design.gapwright:coil: turns = 'x': not a whole number, e.g. 12 (line 14)", refused.getMessage());
+		assertFalse(resource.isLoaded());
+		assertTrue(resource.getContents().isEmpty());
+		resource.load(new ByteArrayInputStream(DesignText.GOOD.getBytes(StandardCharsets.UTF_8)), Map.of());
+		assertEquals("small", resource.design().getName());
+	}
+
+	/** Whatever one byte is turned into: the file reads, or is refused with a problem; nothing else ever happens. */
+	@Test
+	void anySingleDamagedByteEndsInADesignOrAProblem() {
+		byte[] whole = DesignText.GOOD.getBytes(StandardCharsets.UTF_8);
+		Random random = new Random(42);
+		int refused = 0;
+		for (int at = 0; at < whole.length; at++) {
+			byte[] damaged = whole.clone();
+			damaged[at] = (byte) random.nextInt(256);
+			for (String problem : DesignText.problems(damaged)) {
+				assertTrue(problem.startsWith("small.gapwright:"), problem);
+				assertFalse(problem.contains("Exception") || problem.contains("www.w3.org/TR"), problem);
+				refused++;
+			}
+		}
+		assertTrue(refused > whole.length / 2, "only " + refused + " refused");
 	}
 }

@@ -4,7 +4,7 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.Arrays;
 
-/** Saves two contents in turn until it is killed; says "!" once it has begun. */
+/** Saves two contents in turn until it is killed; says "!" when it begins and "." after each save. */
 final class SaveForever {
 
 	private SaveForever() {
@@ -24,6 +24,8 @@ final class SaveForever {
 		System.out.flush();
 		for (int turn = 1;; turn++) {
 			AtomicFile.write(file, contents[turn % 2]);
+			System.out.print(".");
+			System.out.flush();
 		}
 	}
 }

@@ -7,6 +7,8 @@ import java.util.Map;
 
 import org.eclipse.emf.ecore.EStructuralFeature;
 
+import gapwright.model.AttributeText;
+import gapwright.model.Ids;
 import gapwright.model.quantity.Quantity;
 
 /** What values a single feature may take, and which are legal but unlikely to be meant. */
@@ -39,8 +41,7 @@ public final class FeatureDomain {
 		allow(LEG__STACKING_FACTOR, 0, false, 1, "must be above 0, at most 1");
 		LIKELY.put(LEG__STACKING_FACTOR, new Range(0.5, true, 1, "0.5 to 1"));
 		allow(GAP__PIECES, 1, true, 1000, "must be a whole number from 1 to 1000");
-		allow(COIL__TURNS, 1, true, 1e6, "must be a whole number from 1 to 1000000; half turns exist only on"
-				+ " multi-leg cores: place the coil on the leg it encloses");
+		allow(COIL__TURNS, 1, true, 1e6, "must be a whole number from 1 to 1000000");
 		for (EStructuralFeature place : new EStructuralFeature[] { GAP__POSITION, COIL__POSITION, MAGNET__POSITION }) {
 			allow(place, 0, true, 1, "must be from 0 to 1");
 		}
@@ -91,10 +92,14 @@ public final class FeatureDomain {
 	}
 
 	/**
-	 * @param value a {@link Quantity}, a number, or anything without a domain
+	 * @param value a {@link Quantity}, a number, a text, or anything without a domain
 	 * @return why the feature must not have that value, for example "a gap cannot be negative", or null
 	 */
 	public static String problem(EStructuralFeature feature, Object value) {
+		if (value instanceof String text) {
+			String wrong = feature == ELEMENT__ID ? Ids.problem(text) : null;
+			return wrong != null ? wrong : AttributeText.unstorable(text);
+		}
 		Range range = ALLOWED.get(feature);
 		double number = number(value);
 		if (range == null || Double.isNaN(number) && !(value instanceof Double)) {

@@ -10,10 +10,12 @@ import java.util.regex.Pattern;
  */
 public final class Quantity {
 
-	private static final Pattern NUMBER_AND_UNIT = Pattern
-			.compile("([+-]?(?:\\d+\\.?\\d*|\\.\\d+)(?:[eE][+-]?\\d{1,3})?)\\s*(.*)");
+	/** Blanks may be those that text processors put between a number and its unit. */
+	private static final Pattern NUMBER_AND_UNIT = Pattern.compile(
+			"([+\u2212-]?(?:\\d+\\.?\\d*|\\.\\d+)(?:[eE][+-]?\\d{1,3})?)[\\s\u00A0\u2009\u202F]*(.*)");
 	private static final Pattern GAUGE = Pattern.compile("AWG\\s*(-?\\d{1,3})", Pattern.CASE_INSENSITIVE);
-	private static final Pattern COMMA = Pattern.compile("[+-]?\\d+,\\d+.*");
+	/** A longer text is no quantity; reading its digits would only cost time. */
+	private static final int MOST_CHARACTERS = 100;
 	private static final int FINEST_GAUGE = 56;
 	private static final int COARSEST_GAUGE = -3;
 
@@ -39,39 +41,49 @@ public final class Quantity {
 		if (typed.isEmpty()) {
 			throw new QuantityFormatException(text, "empty, expected " + expected.noun(), "e.g. " + expected.example());
 		}
+		if (typed.length() > MOST_CHARACTERS) {
+			throw new QuantityFormatException(typed.substring(0, MOST_CHARACTERS) + "…", "too long for a quantity",
+					"e.g. " + expected.example());
+		}
 		if (expected == Dimension.WIRE) {
 			Matcher gauge = GAUGE.matcher(typed);
 			if (gauge.matches()) {
 				return new Quantity(typed, expected, diameter(typed, Integer.parseInt(gauge.group(1))));
 			}
 		}
-		Matcher parts = NUMBER_AND_UNIT.matcher(typed);
-		if (COMMA.matcher(typed).matches()) {
-			throw new QuantityFormatException(text, "a comma is not read in numbers",
-					"write a decimal point, e.g. " + expected.example());
+		QuantityFormatException misspelt = Misspelling.of(typed, expected);
+		if (misspelt != null) {
+			throw misspelt;
 		}
+		Matcher parts = NUMBER_AND_UNIT.matcher(typed);
 		if (!parts.matches()) {
 			throw new QuantityFormatException(text, "not a number with a unit", "e.g. " + expected.example());
 		}
 		if (parts.group(2).isEmpty()) {
 			throw new QuantityFormatException(text, expected.noun() + " needs a unit", "e.g. " + expected.example());
 		}
-		Units.Unit unit = Units.find(parts.group(2));
-		if (unit == null) {
-			throw new QuantityFormatException(text, "unknown unit '" + parts.group(2) + "'",
-					"expected " + expected.noun() + ", e.g. " + expected.example());
+		Units.Unit unit = unit(text, parts.group(2), expected);
+		BigDecimal magnitude = new BigDecimal(parts.group(1).replace('\u2212', '-'));
+		double si = magnitude.add(unit.offset()).multiply(unit.factor()).doubleValue();
+		if (Double.isInfinite(si) || si == 0 && magnitude.add(unit.offset()).signum() != 0) {
+			throw new QuantityFormatException(text, "out of the range of numbers", "e.g. " + expected.example());
 		}
+		return new Quantity(typed, expected, si);
+	}
+
+	private static Units.Unit unit(String text, String name, Dimension expected) {
 		Dimension needed = expected == Dimension.WIRE ? Dimension.LENGTH : expected;
+		Units.Unit unit = Units.find(name);
+		if (unit == null) {
+			String similar = Units.similar(name, needed);
+			throw new QuantityFormatException(text, "unknown unit '" + name + "'", similar.isEmpty()
+					? "expected " + expected.noun() + ", e.g. " + expected.example() : "did you mean " + similar + "?");
+		}
 		if (unit.dimension() != needed) {
 			throw new QuantityFormatException(text, "that is " + unit.dimension().noun(),
 					"expected " + expected.noun() + ", e.g. " + expected.example());
 		}
-		BigDecimal magnitude = new BigDecimal(parts.group(1));
-		double si = magnitude.add(unit.offset()).multiply(unit.factor()).doubleValue();
-		if (Double.isInfinite(si)) {
-			throw new QuantityFormatException(text, "out of the range of numbers", "e.g. " + expected.example());
-		}
-		return new Quantity(typed, expected, si);
+		return unit;
 	}
 
 	/**

@@ -4,6 +4,8 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 
 /**
  * The units a quantity may be typed in. A table of our own rather than a units library: a design file uses a dozen
@@ -20,6 +22,9 @@ final class Units {
 	private static final String[] PREFIXES = { "f", "p", "n", "µ", "m", "", "k", "M", "G", "T" };
 	private static final int[] EXPONENTS = { -15, -12, -9, -6, -3, 0, 3, 6, 9, 12 };
 	private static final BigDecimal PI = new BigDecimal("3.14159265358979323846264338327950288");
+
+	/** "kg / m³", "deg C"; but "m m" is no unit. */
+	private static final Pattern BLANKS_INSIDE = Pattern.compile("\\s*(/)\\s*|(?<=deg|°)()\\s+");
 
 	static {
 		prefixed(Dimension.LENGTH, "m", 1);
@@ -70,13 +75,22 @@ final class Units {
 		return unit != null ? unit : UNITS.get(plainSpelling(name));
 	}
 
+	/** @return units of the dimension that differ from the name in upper and lower case only, joined by "or"; or "" */
+	static String similar(String name, Dimension dimension) {
+		String plain = plainSpelling(name);
+		return UNITS.entrySet().stream()
+				.filter(each -> each.getValue().dimension() == dimension && each.getKey().equalsIgnoreCase(plain))
+				.map(Map.Entry::getKey).sorted().collect(Collectors.joining(" or "));
+	}
+
 	/** One spelling for µ, squares, cubes, degrees and ohms. */
 	private static String plainSpelling(String name) {
 		String plain = name.replace('\u03BC', '\u00B5').replace('\u2126', '\u03A9').replace("^", "");
 		if (plain.startsWith("u") && plain.length() > 1) {
 			plain = "\u00B5" + plain.substring(1);
 		}
-		plain = plain.replace('2', '²').replace('3', '³').replace("Ohm", "ohm").replace(" ", "");
+		plain = plain.replace('2', '²').replace('3', '³').replace("Ohm", "ohm");
+		plain = BLANKS_INSIDE.matcher(plain).replaceAll("$1");
 		return plain.equals("\u2103") || plain.equals("ºC") ? "°C" : plain;
 	}
 
