@@ -2,6 +2,7 @@ package gapwright.ui.canvas.looks;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 
@@ -48,6 +49,8 @@ final class LabelMaker {
 	private final Scene scene;
 	private final Picture picture;
 	private final Map<Leg, Double> build;
+	/** Gaps without room for their length beside them: it goes into the leg's label. */
+	private final Map<Leg, List<String>> crowded = new HashMap<>();
 	private final LabelLayout layout = new LabelLayout();
 
 	LabelMaker(Design design, OperatingPoint point, OperatingPointResult result, CanvasScale scale, Pen measure,
@@ -68,7 +71,10 @@ final class LabelMaker {
 		for (Bar bar : scene.bars()) {
 			for (Gap gap : bar.leg().getGaps()) {
 				String pieces = gap.getPieces() > 1 ? gap.getPieces() + " × " : "";
-				beside(gap, bar, gap.getPosition(), pieces + (gap.getLength() == null ? "?" : gap.getLength().text()));
+				String length = pieces + (gap.getLength() == null ? "?" : gap.getLength().text());
+				if (!beside(gap, bar, gap.getPosition(), length)) {
+					crowded.computeIfAbsent(bar.leg(), leg -> new ArrayList<>()).add("gap " + length);
+				}
 			}
 			if (bar.leg().getMagnet() != null && bar.leg().getMagnet().getRemanence() != null) {
 				beside(bar.leg().getMagnet(), bar, bar.leg().getMagnet().getPosition(),
@@ -123,7 +129,7 @@ final class LabelMaker {
 	}
 
 	/** A single line next to the bar's wall, or beyond the coil with a leader. */
-	private void beside(EObject element, Bar bar, double position, String text) {
+	private boolean beside(EObject element, Bar bar, double position, String text) {
 		double s = position * bar.length();
 		List<LabelLayout.Place> places = new ArrayList<>();
 		double coil = scale.pixels(build.getOrDefault(bar.leg(), 0.0));
@@ -132,7 +138,7 @@ final class LabelMaker {
 				places.add(place(bar, s, side, distance, 4));
 			}
 		}
-		put(element, List.of(new LabelLine(text, SMALL, false, Tone.NOTE)), places, null);
+		return put(element, List.of(new LabelLine(text, SMALL, false, Tone.NOTE)), places, null);
 	}
 
 	/** The anchor lies off the wall by a distance; anything but next to the wall gets a leader from it. */
@@ -164,10 +170,14 @@ final class LabelMaker {
 				}
 			}
 		}
-		List<LabelLine> lines = lines(bar.leg(), found);
+		List<LabelLine> lines = new ArrayList<>(lines(bar.leg(), found));
+		for (String gap : crowded.getOrDefault(bar.leg(), List.of())) {
+			lines.add(new LabelLine(gap, SMALL, false, Tone.NOTE));
+		}
 		Tone badge = found == null ? null : found.state() == LegState.OVER ? Tone.OVER
 				: found.state() == LegState.NEAR ? Tone.NEAR : null;
-		boolean roomy = scale.pixels(bar.end() - bar.start()) >= ROOMY || badge != null;
+		boolean roomy = scale.pixels(bar.end() - bar.start()) >= ROOMY || badge != null
+				|| crowded.containsKey(bar.leg());
 		if (!(roomy && put(bar.leg(), lines, places, badge)) && found != null) {
 			put(bar.leg(), brief(found, lines), places, badge);
 		}
@@ -206,7 +216,7 @@ final class LabelMaker {
 
 	/** The share of saturation alone, for a leg without room for more. */
 	private static List<LabelLine> brief(LegResult found, List<LabelLine> lines) {
-		LabelLine last = lines.get(lines.size() - 1);
+		LabelLine last = lines.get(Math.min(2, lines.size() - 1));
 		return Double.isNaN(found.utilisation()) ? List.of(last)
 				: List.of(new LabelLine(FigureFormat.percent(found.utilisation()), SMALL, last.tone() != Tone.NOTE,
 						last.tone()));
