@@ -5,7 +5,6 @@ import org.eclipse.draw2d.Viewport;
 import org.eclipse.gef.GraphicalViewer;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.graphics.Point;
-import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Event;
 
 import gapwright.ui.canvas.CanvasModel;
@@ -40,28 +39,15 @@ final class Mouse {
 
 	void move(double x, double y) {
 		Point to = place(x, y);
-		Event event = new Event();
-		event.type = SWT.MouseMove;
-		event.x = to.x;
-		event.y = to.y;
-		Display.getCurrent().post(event);
-		Workbench.drain();
+		RealEvents.send("mousemove", Integer.toString(to.x), Integer.toString(to.y));
 	}
 
 	void down() {
-		button(SWT.MouseDown);
+		RealEvents.send("mousedown", "1");
 	}
 
 	void up() {
-		button(SWT.MouseUp);
-	}
-
-	private static void button(int type) {
-		Event event = new Event();
-		event.type = type;
-		event.button = 1;
-		Display.getCurrent().post(event);
-		Workbench.drain();
+		RealEvents.send("mouseup", "1");
 	}
 
 	void click(double x, double y) {

@@ -15,7 +15,6 @@ import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Display;
-import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Shell;
 import org.eclipse.ui.IViewPart;
 import org.eclipse.ui.IWorkbenchPage;
@@ -144,45 +143,42 @@ final class Workbench {
 
 	/** Presses and releases a key. Pass a character, or a key code of SWT. */
 	static void key(int code, int modifier) {
-		Event event = new Event();
-		boolean named = (code & SWT.KEYCODE_BIT) != 0;
-		event.keyCode = named ? code : 0;
-		event.character = named ? 0 : (char) code;
-		if (modifier != 0) {
-			post(SWT.KeyDown, modifier);
-		}
-		event.type = SWT.KeyDown;
-		Display.getCurrent().post(event);
-		event.type = SWT.KeyUp;
-		Display.getCurrent().post(event);
-		if (modifier != 0) {
-			post(SWT.KeyUp, modifier);
-		}
-		drain();
+		String held = (modifier & SWT.MOD1) != 0 ? "ctrl+" : (modifier & SWT.ALT) != 0 ? "alt+" : "";
+		// an upper case letter already holds Shift
+		String shift = (modifier & SWT.SHIFT) != 0 && (code & SWT.KEYCODE_BIT) != 0 ? "shift+" : "";
+		RealEvents.send("key", held + shift + keyName(code));
 	}
 
-	private static void post(int type, int keyCode) {
-		Event event = new Event();
-		event.type = type;
-		event.keyCode = keyCode;
-		Display.getCurrent().post(event);
+	private static String keyName(int code) {
+		return switch (code) {
+		case SWT.ESC -> "Escape";
+		case SWT.CR -> "Return";
+		case SWT.DEL -> "Delete";
+		case SWT.TAB -> "Tab";
+		case SWT.BS -> "BackSpace";
+		case SWT.F2 -> "F2";
+		case SWT.ARROW_LEFT -> "Left";
+		case SWT.ARROW_RIGHT -> "Right";
+		case SWT.ARROW_UP -> "Up";
+		case SWT.ARROW_DOWN -> "Down";
+		case ' ' -> "space";
+		case '.' -> "period";
+		case ',' -> "comma";
+		case '-' -> "minus";
+		default -> {
+			if (!Character.isLetterOrDigit(code)) {
+				throw new IllegalArgumentException("no name for the key " + code);
+			}
+			yield Character.toString(code);
+		}
+		};
 	}
 
 	/** Presses and releases the left button over a place of a control. */
 	static void click(Control control, int x, int y) {
 		Point place = control.toDisplay(x, y);
-		Event event = new Event();
-		event.type = SWT.MouseMove;
-		event.x = place.x;
-		event.y = place.y;
-		Display.getCurrent().post(event);
-		drain();
-		event.button = 1;
-		event.type = SWT.MouseDown;
-		Display.getCurrent().post(event);
-		event.type = SWT.MouseUp;
-		Display.getCurrent().post(event);
-		drain();
+		RealEvents.send("mousemove", Integer.toString(place.x), Integer.toString(place.y));
+		RealEvents.send("click", "1");
 	}
 
 	/** Posted events come back through the X server, and windows are painted by a clock: the queue may be empty while they are on their way. */
