@@ -70,9 +70,9 @@ final class CanvasActions {
 		menu.addMenuListener(this::fill);
 		viewer.setContextMenu(menu);
 		bindKeys();
-		GraphicalViewerKeyHandler handler = new GraphicalViewerKeyHandler(viewer);
-		handler.setParent(keys);
-		viewer.setKeyHandler(handler);
+		// ours come first: the viewer's own would take arrows with Control
+		keys.setParent(new GraphicalViewerKeyHandler(viewer));
+		viewer.setKeyHandler(keys);
 	}
 
 	private void workbenchActions() {
@@ -183,9 +183,9 @@ final class CanvasActions {
 		keys.put(KeyStroke.getPressed(typed, letter, mask), action("", deed));
 	}
 
-	/** Alt and an arrow move what is selected by one step of the grid. */
+	/** Control and an arrow move what is selected by one step of the grid. */
 	private void nudge(int arrow, int dx, int dy) {
-		key(arrow, 0, SWT.ALT, () -> {
+		key(arrow, 0, SWT.MOD1, () -> {
 			Set<Joint> joints = JointEdits.movedBy(page.selected());
 			if (!joints.isEmpty()) {
 				double step = Snapping.step(canvas.scale());

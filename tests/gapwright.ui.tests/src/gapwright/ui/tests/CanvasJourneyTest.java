@@ -131,7 +131,7 @@ class CanvasJourneyTest {
 		Workbench.key('z', SWT.MOD1);
 		assertArrayEquals(before, bytes());
 		assertFalse(editor.isDirty());
-		Workbench.key('y', SWT.MOD1);
+		Workbench.key('Z', SWT.MOD1);
 		assertTrue(x(corner) < x - 6);
 	}
 
@@ -206,7 +206,7 @@ class CanvasJourneyTest {
 		Leg left = leg("left-leg");
 		mouse.click(x(left.getFrom()), y(left.getFrom()) + 12);
 		double x = x(left.getFrom());
-		Workbench.key(SWT.ARROW_LEFT, SWT.ALT);
+		Workbench.key(SWT.ARROW_LEFT, SWT.MOD1);
 		assertEquals(x - 1, x(left.getFrom()), 1e-9);
 		Workbench.key('G', SWT.SHIFT);
 		assertEquals(1, left.getGaps().size());
