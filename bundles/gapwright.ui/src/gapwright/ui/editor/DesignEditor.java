@@ -49,7 +49,7 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 	@Override
 	public void init(IEditorSite site, IEditorInput input) throws PartInitException {
 		super.init(site, input);
-		selection = new EditorSelection(this, this::chosenOnForm);
+		selection = new EditorSelection(this, this::chosenOnForm, () -> session == null ? null : session.design());
 		site.setSelectionProvider(selection);
 		setPartName(input.getName());
 		try {

@@ -2,7 +2,6 @@ package gapwright.ui.fields;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.Predicate;
 
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EStructuralFeature;
@@ -12,32 +11,37 @@ import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Text;
 
-/** Rows of label and field for the features of one element at a time; the parent gets a grid of two columns. */
+/** Rows of label and field for the features of one element at a time; the parent gets a grid. */
 public final class FeatureForm {
 
 	private static final int LINES = 3;
 
 	private final Composite parent;
+	private final int columns;
 	private final EditRunner runner;
 	private final List<Row> rows = new ArrayList<>();
 	private EObject element;
 
 	public FeatureForm(Composite parent, EditRunner runner) {
+		this(parent, runner, 1);
+	}
+
+	/** @param pairs of label and field on one line */
+	public FeatureForm(Composite parent, EditRunner runner, int pairs) {
 		this.parent = parent;
 		this.runner = runner;
-		parent.setLayout(FormLayouts.grid(2));
+		columns = 2 * pairs;
+		parent.setLayout(FormLayouts.grid(columns));
 	}
 
 	public FeatureForm add(EStructuralFeature... features) {
 		for (EStructuralFeature feature : features) {
-			add(feature, any -> true);
+			rows.add(new Row(feature));
 		}
-		return this;
-	}
-
-	/** @param when whether the row has a meaning for an element */
-	public FeatureForm add(EStructuralFeature feature, Predicate<EObject> when) {
-		rows.add(new Row(feature, when));
+		// with several pairs on a line, what is wrong with one of them stands below the whole line
+		if (columns > 2) {
+			rows.forEach(row -> row.problem.last());
+		}
 		return this;
 	}
 
@@ -74,21 +78,19 @@ public final class FeatureForm {
 	private final class Row {
 
 		private final EStructuralFeature feature;
-		private final Predicate<EObject> when;
 		private final Label label;
 		private final FeatureField field;
 		private final ProblemLine problem;
 		private boolean shown = true;
 
-		Row(EStructuralFeature feature, Predicate<EObject> when) {
+		Row(EStructuralFeature feature) {
 			this.feature = feature;
-			this.when = when;
 			label = new Label(parent, SWT.NONE);
 			label.setLayoutData(new GridData(SWT.BEGINNING, SWT.CENTER, false, false));
 			label.setToolTipText(FeatureText.hint(feature));
 			field = FeatureField.of(parent, feature, runner);
 			GridData wide = new GridData(SWT.FILL, SWT.CENTER, true, false);
-			wide.widthHint = 160;
+			wide.widthHint = columns > 2 ? 70 : 160;
 			field.control().setLayoutData(wide);
 			if (field instanceof FlagField) {
 				label.setText("");
@@ -99,7 +101,7 @@ public final class FeatureForm {
 				wide.heightHint = LINES * text.getLineHeight();
 				((GridData) label.getLayoutData()).verticalAlignment = SWT.TOP;
 			}
-			problem = new ProblemLine(parent, 2);
+			problem = new ProblemLine(parent, columns);
 			field.onProblem(() -> {
 				if (problem.show(field.problem())) {
 					FormLayouts.relayout(parent);
@@ -109,7 +111,7 @@ public final class FeatureForm {
 
 		/** @return whether the row came or went */
 		boolean bind() {
-			boolean visible = element == null || has(element) && when.test(element);
+			boolean visible = element == null || Relevance.of(feature, element);
 			field.bind(visible ? element : null);
 			boolean changed = visible != shown;
 			if (changed) {
@@ -118,10 +120,6 @@ public final class FeatureForm {
 				FormLayouts.show(field.control(), visible);
 			}
 			return changed;
-		}
-
-		private boolean has(EObject next) {
-			return next.eClass().getEAllStructuralFeatures().contains(feature);
 		}
 	}
 }

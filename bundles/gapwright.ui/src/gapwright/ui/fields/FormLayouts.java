@@ -1,7 +1,6 @@
 package gapwright.ui.fields;
 
 import org.eclipse.swt.custom.ScrolledComposite;
-import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
@@ -10,6 +9,9 @@ import org.eclipse.swt.widgets.Shell;
 
 /** Measures shared by all forms, and the new layout of a form whose rows came or went. */
 public final class FormLayouts {
+
+	/** Narrower than this a form page scrolls sideways, px. */
+	private static final int NARROWEST = 420;
 
 	/** Room left of a field for its mark. */
 	static final int MARK = 10;
@@ -41,8 +43,8 @@ public final class FormLayouts {
 		}
 		page.layout(true, true);
 		if (page.getParent() instanceof ScrolledComposite scrolled) {
-			Point size = page.computeSize(Math.max(1, scrolled.getClientArea().width), -1);
-			scrolled.setMinSize(page.computeSize(-1, -1).x, size.y);
+			int width = Math.max(NARROWEST, scrolled.getClientArea().width);
+			scrolled.setMinSize(NARROWEST, page.computeSize(width, -1).y);
 		}
 	}
 }

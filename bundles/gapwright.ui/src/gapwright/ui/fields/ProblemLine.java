@@ -40,6 +40,11 @@ final class ProblemLine {
 		show(null);
 	}
 
+	/** Moves the line below everything in the form. */
+	void last() {
+		label.moveBelow(null);
+	}
+
 	void dispose() {
 		label.dispose();
 	}

@@ -58,7 +58,7 @@ final class CurvePart {
 		Accessibles.name(kind, "Kind of curve");
 		law = new Label(fields, SWT.WRAP);
 		GridData wide = new GridData(SWT.FILL, SWT.TOP, true, false);
-		wide.widthHint = 200;
+		wide.widthHint = 160;
 		law.setLayoutData(wide);
 		Composite form = new Composite(fields, SWT.NONE);
 		form.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
@@ -77,7 +77,8 @@ final class CurvePart {
 		add.addListener(SWT.Selection, event -> page.run(MaterialEdits.addPoint((TableCurve) material.getCurve())));
 		plot = new CurvePlot(parent);
 		GridData square = new GridData(SWT.FILL, SWT.TOP, true, false);
-		square.widthHint = 300;
+		square.widthHint = 270;
+		square.minimumWidth = 200;
 		square.heightHint = 220;
 		plot.setLayoutData(square);
 	}

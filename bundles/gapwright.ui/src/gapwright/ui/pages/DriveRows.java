@@ -28,6 +28,8 @@ import gapwright.ui.fields.Headings;
 /** What each winding is connected to at one operating point: a block for every winding of the design, driven or not. */
 final class DriveRows {
 
+	private static final int NAME_WIDTH = 110;
+
 	private final Composite parent;
 	private final MasterDetailPage page;
 	private final List<Block> blocks = new ArrayList<>();
@@ -78,21 +80,21 @@ final class DriveRows {
 			this.winding = winding;
 			Composite area = new Composite(parent, SWT.NONE);
 			area.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-			area.setLayout(new GridLayout(2, false));
+			area.setLayout(new GridLayout(3, false));
 			name = new Label(area, SWT.NONE);
 			GridData narrow = new GridData(SWT.BEGINNING, SWT.CENTER, false, false);
-			narrow.widthHint = 120;
+			narrow.widthHint = NAME_WIDTH;
 			name.setLayoutData(narrow);
 			kind = new Combo(area, SWT.READ_ONLY);
 			for (DriveKind each : DriveKind.values()) {
 				kind.add(each.label());
 			}
-			kind.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+			kind.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, false, false));
 			kind.addListener(SWT.Selection, event -> connect());
 			Accessibles.name(kind, "Drive");
 			Composite fields = new Composite(area, SWT.NONE);
-			fields.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false, 2, 1));
-			form = new FeatureForm(fields, page.runner()).add(CURRENT_DRIVE__CURRENT, CURRENT_DRIVE__RIPPLE, VOLTAGE_DRIVE__VOLTAGE,
+			fields.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+			form = new FeatureForm(fields, page.runner(), 3).add(CURRENT_DRIVE__CURRENT, CURRENT_DRIVE__RIPPLE, VOLTAGE_DRIVE__VOLTAGE,
 					VOLTAGE_DRIVE__ON_TIME, VOLTAGE_DRIVE__BIAS);
 		}
 

@@ -11,12 +11,12 @@ import org.eclipse.swt.custom.StackLayout;
 import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
-import org.eclipse.swt.widgets.Label;
 
 import gapwright.model.Design;
 import gapwright.model.edit.history.Edit;
 import gapwright.ui.fields.EditRunner;
 import gapwright.ui.fields.FormLayouts;
+import gapwright.ui.fields.Headings;
 import gapwright.ui.session.DesignSession;
 
 /**
@@ -40,10 +40,11 @@ public abstract class MasterDetailPage extends Composite {
 		this.session = session;
 		setLayout(new FillLayout());
 		SashForm sash = new SashForm(this, SWT.HORIZONTAL);
-		list = new MasterList(sash, title, this::label, this::chosen);
-		scrolled = new ScrolledComposite(sash, SWT.V_SCROLL | SWT.H_SCROLL);
-		scrolled.setExpandHorizontal(true);
-		scrolled.setExpandVertical(true);
+		// both sides alike, because the dark theme gives what scrolls another background
+		ScrolledComposite left = scrolled(sash, SWT.NONE);
+		list = new MasterList(left, title, this::label, this::chosen);
+		left.setContent(list.control());
+		scrolled = scrolled(sash, SWT.V_SCROLL | SWT.H_SCROLL);
 		Composite stack = new Composite(scrolled, SWT.NONE);
 		stack.setLayout(new StackLayout());
 		details = new Composite(stack, SWT.NONE);
@@ -53,12 +54,19 @@ public abstract class MasterDetailPage extends Composite {
 		details.setLayout(grid);
 		emptiness = new Composite(stack, SWT.NONE);
 		emptiness.setLayout(new GridLayout());
-		new Label(emptiness, SWT.WRAP).setText(whenEmpty);
+		Headings.note(emptiness, whenEmpty, 1);
 		scrolled.setContent(stack);
 		scrolled.addListener(SWT.Resize, event -> FormLayouts.relayout(stack));
 		sash.setWeights(28, 72);
 		session.history().addListener(refresher);
 		addListener(SWT.Dispose, event -> session.history().removeListener(refresher));
+	}
+
+	private static ScrolledComposite scrolled(Composite parent, int style) {
+		ScrolledComposite scrolled = new ScrolledComposite(parent, style);
+		scrolled.setExpandHorizontal(true);
+		scrolled.setExpandVertical(true);
+		return scrolled;
 	}
 
 	/** Builds the fields; called once by the constructor of the page. */

@@ -44,7 +44,7 @@ final class MasterList {
 		table.addListener(SWT.Selection, event -> choose(shown.get(table.getSelectionIndex())));
 		Accessibles.name(table, title);
 		buttons = new Composite(area, SWT.NONE);
-		GridLayout row = new GridLayout(0, true);
+		GridLayout row = new GridLayout(0, false);
 		row.marginWidth = 0;
 		buttons.setLayout(row);
 		buttons.setLayoutData(new GridData(SWT.FILL, SWT.BOTTOM, true, false));

@@ -39,8 +39,7 @@ public final class OperatingPointsPage extends MasterDetailPage {
 
 	@Override
 	String label(EObject element) {
-		OperatingPoint point = (OperatingPoint) element;
-		return FeatureText.name(point) + (point.getTemperature() == null ? "" : "   " + point.getTemperature());
+		return FeatureText.name(element);
 	}
 
 	@Override

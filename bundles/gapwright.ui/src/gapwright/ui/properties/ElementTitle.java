@@ -6,7 +6,7 @@ import org.eclipse.jface.viewers.LabelProvider;
 
 import gapwright.ui.fields.FeatureText;
 
-/** Title of the Properties view: "Leg centre leg". */
+/** Title of the Properties view: "Leg top yoke", "Leg a". */
 public final class ElementTitle extends LabelProvider {
 
 	@Override
@@ -17,7 +17,7 @@ public final class ElementTitle extends LabelProvider {
 		}
 		String kind = FeatureText.kind(element.eClass());
 		String name = FeatureText.name(element);
-		String title = name.equals(kind) ? kind : kind + ' ' + name;
+		String title = name.startsWith(kind) ? name : kind + ' ' + name;
 		return Character.toUpperCase(title.charAt(0)) + title.substring(1);
 	}
 }

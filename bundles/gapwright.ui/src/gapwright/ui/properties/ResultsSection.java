@@ -16,11 +16,15 @@ import gapwright.ui.fields.FeatureText;
 import gapwright.ui.fields.Figure;
 import gapwright.ui.fields.FormLayouts;
 import gapwright.ui.fields.Headings;
+import gapwright.ui.fields.ThemeColours;
 import gapwright.ui.session.DesignSession;
 import gapwright.ui.session.SessionListener;
 
 /** What was reckoned for the element at the chosen operating point, each figure with its origin. */
 public final class ResultsSection extends ElementSection {
+
+	/** Origins wrap from here on, px. */
+	private static final int NARROW = 150;
 
 	private final SessionListener listener = this::refresh;
 	private DesignSession listening;
@@ -31,7 +35,7 @@ public final class ResultsSection extends ElementSection {
 	@Override
 	void build(Composite into) {
 		area = into;
-		area.setLayout(FormLayouts.grid(3));
+		area.setLayout(FormLayouts.grid(2));
 	}
 
 	@Override
@@ -83,12 +87,15 @@ public final class ResultsSection extends ElementSection {
 		for (Control child : area.getChildren()) {
 			child.dispose();
 		}
-		Headings.note(area, explained, 3);
+		((GridData) Headings.note(area, explained, 2).getLayoutData()).widthHint = NARROW;
 		for (Figure figure : shown) {
 			label(figure.name());
 			Label value = label(figure.value());
 			value.setFont(JFaceResources.getFontRegistry().getBold(JFaceResources.DIALOG_FONT));
-			Headings.note(area, figure.origin(), 1);
+			Label origin = Headings.note(area, figure.origin(), 2);
+			origin.setForeground(ThemeColours.NOTE.get());
+			((GridData) origin.getLayoutData()).horizontalIndent = 12;
+			((GridData) origin.getLayoutData()).widthHint = NARROW;
 		}
 		FormLayouts.relayout(area);
 	}

@@ -41,7 +41,6 @@ final class LedgerTable<R> {
 		this.settings = settings;
 		table = new Table(parent, SWT.MULTI | SWT.FULL_SELECTION);
 		table.setHeaderVisible(true);
-		table.setLinesVisible(true);
 		for (LedgerColumn<R> column : columns) {
 			create(column);
 		}

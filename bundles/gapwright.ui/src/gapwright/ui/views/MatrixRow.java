@@ -21,11 +21,11 @@ record MatrixRow(String id, String name, int index, InductanceMatrix matrix) {
 
 	static List<LedgerColumn<MatrixRow>> columns(List<String> names) {
 		List<LedgerColumn<MatrixRow>> columns = new ArrayList<>();
-		columns.add(LedgerColumn.words("Differential L", "Slope of the row's linkage over the column's current", 100, MatrixRow::name));
+		columns.add(LedgerColumn.words("Differential L", "Slope of the row's linkage over the column's current", 90, MatrixRow::name));
 		for (int k = 0; k < names.size(); k++) {
 			int other = k;
 			columns.add(new LedgerColumn<>("matrix", names.get(k), "H", "Per ampere in " + names.get(k) + "; k is the coupling, its sign tells aiding or opposing",
-					140, true, row -> row.shown(other), row -> Double.toString(row.inductance(other)),
+					130, true, row -> row.shown(other), row -> Double.toString(row.inductance(other)),
 					(a, b) -> Double.compare(a.inductance(other), b.inductance(other))));
 		}
 		return columns;

@@ -12,15 +12,15 @@ final class WindingColumns {
 
 	static List<LedgerColumn<WindingRow>> all() {
 		return List.of(
-				LedgerColumn.words("Winding", "Name of the winding, else its id", 100, WindingRow::name),
-				LedgerColumn.figures("Turns", "1", "Of all its coils together", 55, WindingRow::turns,
+				LedgerColumn.words("Winding", "Name of the winding, else its id", 85, WindingRow::name),
+				LedgerColumn.figures("Turns", "1", "Of all its coils together", 50, WindingRow::turns,
 						turns -> Integer.toString(turns.intValue())),
 				LedgerColumn.figures("Current", "A", "Mean current at the operating point", 75,
 						row -> row.result().current(), value -> FigureFormat.si(value, "A")),
 				LedgerColumn.figures("Linkage", "Wb", "Sum of turns times flux, each coil with its sense", 85,
 						row -> row.result().linkage(), value -> FigureFormat.si(value, "Wb")),
 				LedgerColumn.figures("Apparent L", "H",
-						"Linkage over current; there is one only where this winding alone carries current and no magnet acts", 90,
+						"Linkage over current; there is one only where this winding alone carries current and no magnet acts", 85,
 						row -> row.result().apparentInductance(), value -> FigureFormat.si(value, "H")),
 				LedgerColumn.figures("Differential L", "H",
 						"Slope of the linkage over the winding's own current at the operating point; what the ripple sees", 100,

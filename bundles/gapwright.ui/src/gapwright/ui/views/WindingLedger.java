@@ -33,7 +33,7 @@ public final class WindingLedger extends DesignView {
 		table = new LedgerTable<>(sash, WindingColumns.all(), LedgerSettings.of("windings"));
 		table.onSelect(rows -> publish(rows.stream().map(WindingRow::winding).toList()));
 		matrix = new MatrixPart(sash);
-		sash.setWeights(55, 45);
+		sash.setWeights(60, 40);
 	}
 
 	@Override

@@ -46,8 +46,8 @@ final class StartPage extends WizardPage {
 	private void createChoice(Composite area) {
 		table = new Table(area, SWT.SINGLE | SWT.BORDER | SWT.FULL_SELECTION | SWT.V_SCROLL);
 		GridData data = new GridData(SWT.FILL, SWT.FILL, false, true);
-		data.widthHint = 280;
-		data.heightHint = 11 * table.getItemHeight();
+		data.widthHint = 350;
+		data.heightHint = 9 * table.getItemHeight();
 		table.setLayoutData(data);
 		Accessibles.name(table, "Start from");
 		for (Start start : starts) {
@@ -79,9 +79,9 @@ final class StartPage extends WizardPage {
 		label.setLayoutData(new GridData(SWT.FILL, SWT.BOTTOM, true, false, 2, 1));
 		Text cautions = new Text(area, SWT.MULTI | SWT.READ_ONLY | SWT.WRAP | SWT.V_SCROLL | SWT.BORDER);
 		cautions.setText("•  " + String.join("\n•  ", Cautions.all()));
-		GridData data = new GridData(SWT.FILL, SWT.FILL, true, true, 2, 1);
-		data.widthHint = 620;
-		data.heightHint = 9 * cautions.getLineHeight();
+		GridData data = new GridData(SWT.FILL, SWT.FILL, true, false, 2, 1);
+		data.widthHint = 760;
+		data.heightHint = 13 * cautions.getLineHeight();
 		cautions.setLayoutData(data);
 		Accessibles.name(cautions, "Cautions");
 	}

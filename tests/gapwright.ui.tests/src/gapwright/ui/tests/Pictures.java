@@ -8,10 +8,9 @@ import org.eclipse.swt.graphics.Image;
 import org.eclipse.swt.graphics.ImageData;
 import org.eclipse.swt.graphics.ImageLoader;
 import org.eclipse.swt.graphics.Rectangle;
-import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Shell;
 
-/** Pictures of windows as they stand on the screen, for people to look at: target/pictures. */
+/** Pictures of windows, painted by the widgets themselves, for people to look at: target/pictures. */
 final class Pictures {
 
 	private static final File FOLDER = new File(System.getProperty("gapwright.pictures", "target/pictures"));
@@ -23,11 +22,11 @@ final class Pictures {
 	static ImageData of(Shell shell, String name) {
 		shell.redraw();
 		Workbench.drain(250);
-		Rectangle bounds = shell.getBounds();
-		Display display = shell.getDisplay();
-		GC gc = new GC(display);
-		Image image = new Image(display, bounds.width, bounds.height);
-		gc.copyArea(image, bounds.x, bounds.y);
+		Rectangle bounds = shell.getClientArea();
+		Image image = new Image(shell.getDisplay(), bounds.width, bounds.height);
+		GC gc = new GC(image);
+		// what is copied off the screen of a virtual display is stale; printing asks every widget to paint itself
+		shell.print(gc);
 		gc.dispose();
 		ImageData data = image.getImageData();
 		image.dispose();
