@@ -6,10 +6,10 @@ import java.nio.charset.StandardCharsets;
 import java.util.List;
 
 /** A small valid design file to break in one place. */
-final class DesignText {
+public final class DesignText {
 
-	static final String HEAD = "<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n";
-	static final String GOOD = HEAD
+	public static final String HEAD = "<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n";
+	public static final String GOOD = HEAD
 			+ "<gapwright:Design xmi:version=\"2.0\" xmlns:xmi=\"http://www.omg.org/XMI\" xmlns:xsi=\"http://www.w3.org/2001/XMLSchema-instance\" xmlns:gapwright=\"urn:gapwright:design:1\" name=\"small\">\n"
 			+ "  <materials id=\"ferrite\" name=\"ferrite\">\n"
 			+ "    <curve xsi:type=\"gapwright:KneeCurve\" initialPermeability=\"2300.0\" saturationPolarisation=\"0.5 T\"/>\n"
@@ -32,16 +32,16 @@ final class DesignText {
 	private DesignText() {
 	}
 
-	static Design read(String text) throws IOException {
+	public static Design read(String text) throws IOException {
 		return DesignReader.read(new ByteArrayInputStream(text.getBytes(StandardCharsets.UTF_8)), "small.gapwright");
 	}
 
 	/** @return every problem's text, empty when it reads */
-	static List<String> problems(String text) {
+	public static List<String> problems(String text) {
 		return problems(text.getBytes(StandardCharsets.UTF_8));
 	}
 
-	static List<String> problems(byte[] content) {
+	public static List<String> problems(byte[] content) {
 		try {
 			DesignReader.read(new ByteArrayInputStream(content), "small.gapwright");
 			return List.of();

@@ -61,6 +61,7 @@ public final class FeatureDomain {
 			above0(saturation, "must be above 0");
 			LIKELY.put(saturation, new Range(0.05, true, 2.6, "0.05 T to 2.6 T"));
 		}
+		LIKELY.put(CURVE_POINT__FLUX_DENSITY, new Range(0, true, 5, "up to 5 T"));
 		above0(ROLL_OFF_CURVE__HALF_FIELD_STRENGTH, "must be above 0");
 		allow(ROLL_OFF_CURVE__EXPONENT, 1, false, INFINITE, "must be above 1");
 		above0(AIR_PATH__PERMEANCE, "must be above 0");
