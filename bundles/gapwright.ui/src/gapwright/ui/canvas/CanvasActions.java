@@ -35,6 +35,7 @@ import gapwright.model.edit.JointSpot;
 import gapwright.model.edit.LegEdits;
 import gapwright.model.edit.Snippet;
 import gapwright.model.edit.history.Edit;
+import gapwright.model.edit.history.EditHistory;
 import gapwright.ui.canvas.export.PictureExport;
 import gapwright.ui.canvas.parts.ElementPart;
 import gapwright.ui.session.DesignSession;
@@ -105,7 +106,17 @@ final class CanvasActions {
 		};
 	}
 
+	private static IAction history(String verb, String step, boolean possible, Runnable deed) {
+		IAction action = action(possible ? verb + ' ' + step : verb, deed);
+		action.setEnabled(possible);
+		return action;
+	}
+
 	private void fill(IMenuManager into) {
+		EditHistory history = session().history();
+		into.add(history("Undo", history.undoLabel(), history.canUndo(), history::undo));
+		into.add(history("Redo", history.redoLabel(), history.canRedo(), history::redo));
+		into.add(new Separator());
 		List<EObject> selected = page.selected();
 		EObject last = selected.isEmpty() ? null : selected.get(selected.size() - 1);
 		if (last != null) {

@@ -1,5 +1,9 @@
 package gapwright.ui.canvas;
 
+import java.beans.PropertyChangeListener;
+
+import org.eclipse.draw2d.FigureCanvas;
+import org.eclipse.draw2d.Viewport;
 import org.eclipse.draw2d.geometry.Rectangle;
 import org.eclipse.emf.ecore.EAttribute;
 import org.eclipse.emf.ecore.EObject;
@@ -34,6 +38,7 @@ public final class QuickEntry {
 	private final EAttribute attribute;
 	private final Text field;
 	private final ControlDecoration mark;
+	private final Runnable moved = this::place;
 
 	private QuickEntry(ElementPart part, EAttribute attribute) {
 		this.part = part;
@@ -45,10 +50,15 @@ public final class QuickEntry {
 		Object value = element().eGet(attribute);
 		field.setText(value == null ? "" : EcoreUtil.convertToString(attribute.getEAttributeType(), value));
 		field.setToolTipText(FeatureText.label(attribute));
-		Rectangle box = part.getFigure().getBounds().getCopy();
-		part.getFigure().translateToAbsolute(box);
-		int height = field.computeSize(SWT.DEFAULT, SWT.DEFAULT).y;
-		field.setBounds(box.getCenter().x - WIDTH / 2, box.getCenter().y - height / 2, WIDTH, height);
+		place();
+		Viewport view = ((FigureCanvas) field.getParent()).getViewport();
+		PropertyChangeListener scrolled = event -> place();
+		view.addPropertyChangeListener(Viewport.PROPERTY_VIEW_LOCATION, scrolled);
+		part.canvas().addListener(moved);
+		field.addListener(SWT.Dispose, event -> {
+			view.removePropertyChangeListener(Viewport.PROPERTY_VIEW_LOCATION, scrolled);
+			part.canvas().removeListener(moved);
+		});
 		field.selectAll();
 		field.setFocus();
 		field.addListener(SWT.Modify, event -> problem());
@@ -66,6 +76,21 @@ public final class QuickEntry {
 				close();
 			}
 		});
+	}
+
+	/** Over the middle of the element, wherever that is now. */
+	private void place() {
+		if (field.isDisposed()) {
+			return;
+		}
+		if (!part.isActive()) {
+			close();
+			return;
+		}
+		Rectangle box = part.getFigure().getBounds().getCopy();
+		part.getFigure().translateToAbsolute(box);
+		int height = field.computeSize(SWT.DEFAULT, SWT.DEFAULT).y;
+		field.setBounds(box.getCenter().x - WIDTH / 2, box.getCenter().y - height / 2, WIDTH, height);
 	}
 
 	/** Opens the field over an element. */

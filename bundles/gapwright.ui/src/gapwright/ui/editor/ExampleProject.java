@@ -5,6 +5,7 @@ import java.io.InputStream;
 
 import org.eclipse.core.resources.IFile;
 import org.eclipse.core.resources.IProject;
+import org.eclipse.core.resources.IResource;
 import org.eclipse.core.resources.ResourcesPlugin;
 import org.eclipse.core.runtime.CoreException;
 import org.eclipse.core.runtime.IProgressMonitor;
@@ -35,6 +36,8 @@ public final class ExampleProject {
 		if (!project.isOpen()) {
 			project.open(monitor);
 		}
+		// after a workbench that was killed the files may be on disk and not yet known
+		project.refreshLocal(IResource.DEPTH_ONE, monitor);
 		for (Example example : Examples.all()) {
 			IFile file = project.getFile(example.fileName());
 			if (!file.exists()) {

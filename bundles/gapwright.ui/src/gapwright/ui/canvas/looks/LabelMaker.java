@@ -163,8 +163,8 @@ final class LabelMaker {
 			if (distance > NEAR_BY && places.size() == 2 * SHARES.length) {
 				ends(bar, places);
 			}
-			for (double share : SHARES) {
-				for (int side : new int[] { outward, -outward }) {
+			for (int side : new int[] { outward, -outward }) {
+				for (double share : SHARES) {
 					double s = bar.start() + share * (bar.end() - bar.start());
 					places.add(place(bar, s, side, distance + coil, NEAR_BY + coil));
 				}

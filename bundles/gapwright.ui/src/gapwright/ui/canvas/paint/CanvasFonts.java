@@ -7,7 +7,7 @@ import org.eclipse.swt.graphics.Font;
 import org.eclipse.swt.graphics.FontData;
 
 /** The workbench's font in the sizes of the canvas; owned by JFace's registry. */
-final class CanvasFonts {
+public final class CanvasFonts {
 
 	private static final double POINTS_PER_PIXEL = 0.75;
 
@@ -23,6 +23,11 @@ final class CanvasFonts {
 			registry.put(key, new FontData[] { new FontData(base.getName(), points, base.getStyle()) });
 		}
 		return bold ? registry.getBold(key) : registry.get(key);
+	}
+
+	/** @return width in pixels of a text in a size of pixels */
+	public static double width(String text, double pixels, boolean bold) {
+		return width(text, get(pixels, bold));
 	}
 
 	static double width(String text, Font font) {

@@ -87,7 +87,7 @@ public final class GraphicsPen implements Pen {
 
 	@Override
 	public double textWidth(String text, double size, boolean bold) {
-		return CanvasFonts.width(text, CanvasFonts.get(size, bold));
+		return CanvasFonts.width(text, size, bold);
 	}
 
 	private static PointList points(double[] polygon) {

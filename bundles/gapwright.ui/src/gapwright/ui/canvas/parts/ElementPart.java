@@ -1,10 +1,9 @@
 package gapwright.ui.canvas.parts;
 
-import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Collectors;
 
 import org.eclipse.draw2d.IFigure;
-import org.eclipse.draw2d.Label;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.gef.AccessibleEditPart;
 import org.eclipse.gef.DragTracker;
@@ -12,6 +11,7 @@ import org.eclipse.gef.EditPolicy;
 import org.eclipse.gef.Request;
 import org.eclipse.gef.RequestConstants;
 import org.eclipse.gef.editparts.AbstractGraphicalEditPart;
+import org.eclipse.swt.accessibility.AccessibleControlEvent;
 import org.eclipse.swt.accessibility.AccessibleEvent;
 
 import gapwright.model.Coil;
@@ -78,8 +78,9 @@ public class ElementPart extends AbstractGraphicalEditPart {
 
 	/** @return one line, for screen readers and tests: what it is, its name, how full it is */
 	public String spokenName() {
-		StringBuilder text = new StringBuilder(FeatureText.kind(element().eClass())).append(' ')
-				.append(FeatureText.name(element()));
+		String kind = FeatureText.kind(element().eClass());
+		StringBuilder text = new StringBuilder().append(Character.toUpperCase(kind.charAt(0))).append(kind, 1, kind.length())
+				.append(' ').append(FeatureText.name(element()));
 		for (Figure figure : figures()) {
 			if (figure.name().equals("Of saturation")) {
 				text.append(", ").append(figure.value()).append(" of saturation");
@@ -96,12 +97,7 @@ public class ElementPart extends AbstractGraphicalEditPart {
 	}
 
 	private IFigure hover() {
-		List<String> lines = new ArrayList<>();
-		lines.add(spokenName());
-		for (Figure figure : figures()) {
-			lines.add(figure.name() + ":  " + figure.value() + (figure.origin().isEmpty() ? "" : "   – " + figure.origin()));
-		}
-		return new Label(String.join("\n", lines));
+		return new HoverCard(spokenName(), figures());
 	}
 
 	@Override
@@ -112,6 +108,12 @@ public class ElementPart extends AbstractGraphicalEditPart {
 				@Override
 				public void getName(AccessibleEvent event) {
 					event.result = spokenName();
+				}
+
+				@Override
+				public void getValue(AccessibleControlEvent event) {
+					event.result = figures().stream().map(figure -> figure.name() + ' ' + figure.value())
+							.collect(Collectors.joining(", "));
 				}
 			};
 		}

@@ -1,7 +1,5 @@
 package gapwright.ui.canvas.tools;
 
-import java.util.function.Supplier;
-
 import org.eclipse.draw2d.geometry.Point;
 import org.eclipse.gef.GraphicalEditPart;
 import org.eclipse.gef.tools.SelectEditPartTracker;
@@ -61,13 +59,19 @@ abstract class DragEdit extends SelectEditPartTracker {
 	protected boolean handleDragInProgress() {
 		if (isInState(STATE_DRAG_IN_PROGRESS) && gesture != null) {
 			double[] now = millimetres(getLocation());
-			Edit edit = edit(start, now);
-			if (edit != null) {
-				Supplier<Edit> whole = () -> edit;
-				gesture.show(whole);
-			}
+			// asked for once the design is again as it was when the drag began: it may look for joints there
+			gesture.show(() -> {
+				Edit edit = edit(start, now);
+				return edit == null ? nothing() : edit;
+			});
 		}
 		return true;
+	}
+
+	private Edit nothing() {
+		return new Edit("Move", canvas.session().design(), () -> {
+			// the pointer is where there is nothing to do: the design shows as before
+		});
 	}
 
 	@Override
