@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -136,11 +137,19 @@ class ArrowsTest {
 		return sources;
 	}
 
-	/** Our bundles but for the fragments that stand in for classes of the platform. */
+	/** Our bundles but for the fragments that fill in what bundles of the platform lack. */
 	private static List<Path> bundles() throws IOException {
 		try (Stream<Path> folders = Files.list(BUNDLES)) {
 			return folders.filter(f -> Files.exists(f.resolve("META-INF/MANIFEST.MF")))
-					.filter(f -> !f.getFileName().toString().startsWith("gapwright.gef.")).sorted().toList();
+					.filter(f -> !isFragment(f)).sorted().toList();
+		}
+	}
+
+	private static boolean isFragment(Path bundle) {
+		try {
+			return Files.readString(bundle.resolve("META-INF/MANIFEST.MF")).contains("Fragment-Host:");
+		} catch (IOException e) {
+			throw new UncheckedIOException(e);
 		}
 	}
 }
