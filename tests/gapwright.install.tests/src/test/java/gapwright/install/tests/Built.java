@@ -20,6 +20,10 @@ final class Built {
 	private Built() {
 	}
 
+	static Path script(String name) {
+		return ROOT.resolve("releng").resolve(name);
+	}
+
 	/** @return the jar of the bundle that reads the canvas */
 	static Path reader() throws IOException {
 		return one(ROOT.resolve("tests/gapwright.install.reader/target"), "gapwright.install.reader-", ".jar");
