@@ -15,6 +15,7 @@ import java.nio.file.attribute.PosixFilePermissions;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.TimeUnit;
+import java.util.function.Consumer;
 import java.util.stream.Stream;
 
 import org.eclipse.core.runtime.FileLocator;
@@ -137,6 +138,23 @@ class RoundTripTest {
 		assertEquals("wound: name: the character U+0001 cannot be stored in a file, delete it",
 				assertThrows(IOException.class, () -> DesignWriter.write(design, file)).getMessage());
 		assertEquals(DesignText.GOOD, Files.readString(file));
+	}
+
+	/** What the reader would refuse is never written. */
+	@Test
+	void whatCouldNotBeReadBackIsNamedBeforeAnythingIsWritten() throws IOException {
+		Map<Consumer<Design>, String> faults = Map.of(
+				design -> design.getJoints().get(1).setId("a"), "a: id: is given twice, give one of the elements another",
+				design -> design.getJoints().get(1).setId(null), "Joint: id: is missing",
+				design -> design.getJoints().get(1).setId("a b"), "a b: id: an id must not contain blanks, # or :, nor begin with /",
+				design -> design.getLegs().get(0).setStackingFactor(Double.NaN), "wound: stackingFactor: not a number, e.g. 0.95");
+		for (Map.Entry<Consumer<Design>, String> fault : faults.entrySet()) {
+			Design design = DesignText.read(DesignText.GOOD);
+			fault.getKey().accept(design);
+			Path file = folder.resolve("design.gapwright");
+			assertEquals(fault.getValue(), assertThrows(IOException.class, () -> DesignWriter.write(design, file)).getMessage());
+			assertEquals(List.of(), files());
+		}
 	}
 
 	@Test

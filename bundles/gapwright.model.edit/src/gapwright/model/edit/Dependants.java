@@ -10,7 +10,6 @@ import java.util.Set;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.util.EcoreUtil;
 
-import gapwright.model.AirPath;
 import gapwright.model.Coil;
 import gapwright.model.Design;
 import gapwright.model.Joint;
@@ -35,18 +34,26 @@ final class Dependants {
 		if (elements.isEmpty()) {
 			throw new IllegalArgumentException("nothing to delete");
 		}
-		Dependants search = new Dependants((Design) EcoreUtil.getRootContainer(elements.iterator().next()));
+		if (!(EcoreUtil.getRootContainer(elements.iterator().next()) instanceof Design design) || elements.contains(design)) {
+			throw new IllegalArgumentException("only what is in a design can be deleted from it");
+		}
+		Dependants search = new Dependants(design);
 		elements.forEach(search::add);
 		while (!search.open.isEmpty()) {
 			search.follow(search.open.pop());
 		}
 		Set<EObject> outermost = new LinkedHashSet<>(search.doomed);
-		outermost.removeIf(element -> EcoreUtil.isAncestor(without(search.doomed, element), element));
+		outermost.removeIf(search::goesWithItsContainer);
 		return outermost;
 	}
 
-	private static List<EObject> without(Set<EObject> all, EObject one) {
-		return all.stream().filter(other -> other != one).toList();
+	private boolean goesWithItsContainer(EObject element) {
+		for (EObject around = element.eContainer(); around != null; around = around.eContainer()) {
+			if (doomed.contains(around)) {
+				return true;
+			}
+		}
+		return false;
 	}
 
 	private void add(EObject element) {
@@ -58,9 +65,10 @@ final class Dependants {
 	private void follow(EObject element) {
 		if (element instanceof Joint joint) {
 			design.getLegs().stream().filter(leg -> leg.getFrom() == joint || leg.getTo() == joint).forEach(this::add);
-			design.getAirPaths().stream().filter((AirPath path) -> path.getFrom() == joint || path.getTo() == joint).forEach(this::add);
+			design.getAirPaths().stream().filter(path -> path.getFrom() == joint || path.getTo() == joint).forEach(this::add);
 		} else if (element instanceof Leg leg) {
-			design.getWindings().forEach(winding -> winding.getCoils().stream().filter(coil -> coil.getLeg() == leg).forEach(this::add));
+			design.getWindings().forEach(
+					winding -> winding.getCoils().stream().filter(coil -> coil.getLeg() == leg).forEach(this::add));
 		} else if (element instanceof Coil coil && coil.eContainer() instanceof Winding winding) {
 			if (doomed.containsAll(winding.getCoils())) {
 				add(winding);
@@ -74,7 +82,9 @@ final class Dependants {
 
 	/** The legs that stay but lose their material. */
 	static List<Leg> legsOf(Set<EObject> doomed) {
-		return doomed.stream().filter(Material.class::isInstance).flatMap(material -> ((Design) material.eContainer()).getLegs().stream()
-				.filter(leg -> leg.getMaterial() == material && !doomed.contains(leg))).toList();
+		return doomed.stream().filter(Material.class::isInstance)
+				.flatMap(material -> ((Design) material.eContainer()).getLegs().stream()
+						.filter(leg -> leg.getMaterial() == material && !doomed.contains(leg)))
+				.toList();
 	}
 }

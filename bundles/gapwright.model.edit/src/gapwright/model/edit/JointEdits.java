@@ -13,8 +13,8 @@ import gapwright.model.Design;
 import gapwright.model.Ids;
 import gapwright.model.Joint;
 import gapwright.model.Leg;
-import gapwright.model.LegGeometry;
 import gapwright.model.edit.history.Edit;
+import gapwright.model.quantity.Quantity;
 
 /** Edits of joints; legs follow their joints. Places in millimetres on the page. */
 public final class JointEdits {
@@ -45,13 +45,17 @@ public final class JointEdits {
 		return joints;
 	}
 
-	/** @param joints at least one */
+	/**
+	 * Moves joints; a coordinate that does not change keeps the unit it was typed in, one that is missing counts as 0.
+	 *
+	 * @param joints at least one
+	 */
 	public static Edit move(Collection<Joint> joints, double dx, double dy) {
 		List<Joint> moved = List.copyOf(joints);
 		return new Edit(moved.size() == 1 ? "Move joint" : "Move joints", moved, () -> {
 			for (Joint joint : moved) {
-				joint.setX(JointSpot.millimetres(millimetres(joint, true) + dx));
-				joint.setY(JointSpot.millimetres(millimetres(joint, false) + dy));
+				joint.setX(moved(joint.getX(), dx));
+				joint.setY(moved(joint.getY(), dy));
 			}
 		});
 	}
@@ -75,7 +79,10 @@ public final class JointEdits {
 		});
 	}
 
-	private static double millimetres(Joint joint, boolean x) {
-		return LegGeometry.si(x ? joint.getX() : joint.getY()) * 1e3;
+	private static Quantity moved(Quantity place, double millimetres) {
+		if (place == null) {
+			return JointSpot.millimetres(millimetres);
+		}
+		return millimetres == 0 ? place : JointSpot.millimetres(place.si() * 1e3 + millimetres);
 	}
 }

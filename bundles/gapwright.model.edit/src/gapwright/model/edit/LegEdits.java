@@ -85,10 +85,25 @@ public final class LegEdits {
 		});
 	}
 
+	/** @param atFrom which end goes to the spot */
+	public static Edit reattach(Design design, AirPath path, boolean atFrom, JointSpot spot) {
+		return new Edit("Re-attach air path", design, () -> {
+			Joint joint = spot.in(design, Ids.used(design));
+			if (atFrom) {
+				path.setFrom(joint);
+			} else {
+				path.setTo(joint);
+			}
+		});
+	}
+
 	/**
 	 * @param width mm, &gt; 0; of a round leg the diameter, of a given area the side of its square
 	 */
 	public static Edit widen(Leg leg, double width) {
+		if (!(width > 0 && width < Double.POSITIVE_INFINITY)) {
+			throw new IllegalArgumentException("width = " + width + " mm: must be above 0");
+		}
 		Quantity length = JointSpot.millimetres(width);
 		return new Edit("Change leg width", leg, () -> {
 			if (leg.getShape() == SectionShape.ROUND) {

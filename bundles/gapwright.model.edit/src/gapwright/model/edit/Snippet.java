@@ -91,8 +91,8 @@ public final class Snippet {
 	}
 
 	/**
-	 * Adds a copied part with fresh ids, a step right and down; a material that the design already has under its id is
-	 * used, others are added.
+	 * Adds a copied part with fresh ids, a step right and down; a material that the design already has, the
+	 * same in every figure, is used; others are added.
 	 *
 	 * @param text   from {@link #copy}
 	 * @param pasted is told of the legs and joints once they are there
@@ -130,7 +130,7 @@ public final class Snippet {
 
 	private static void useOwnMaterials(Design design, Design part) {
 		for (Material theirs : List.copyOf(part.getMaterials())) {
-			if (Ids.find(design, theirs.getId()) instanceof Material ours) {
+			if (Ids.find(design, theirs.getId()) instanceof Material ours && EcoreUtil.equals(ours, theirs)) {
 				for (Leg leg : part.getLegs()) {
 					if (leg.getMaterial() == theirs) {
 						leg.setMaterial(ours);

@@ -8,11 +8,14 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.List;
 import java.util.concurrent.atomic.AtomicInteger;
 
+import org.eclipse.emf.common.command.AbstractCommand;
+import org.eclipse.emf.edit.command.SetCommand;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 
 import gapwright.model.Design;
 import gapwright.model.GapwrightFactory;
+import gapwright.model.GapwrightPackage;
 import gapwright.model.Joint;
 import gapwright.model.quantity.Dimension;
 import gapwright.model.quantity.Quantity;
@@ -168,5 +171,56 @@ class EditHistoryTest {
 			deed.run();
 			assertTrue(heard.get() > before);
 		}
+	}
+
+	/** EMF's own stack would log the exception and go on as if nothing had happened. */
+	@Test
+	void anExceptionOfAFrameworksCommandReachesTheCaller() {
+		AbstractCommand broken = new AbstractCommand("Break") {
+
+			@Override
+			protected boolean prepare() {
+				return true;
+			}
+
+			@Override
+			public void execute() {
+				throw new IllegalStateException("half way");
+			}
+
+			@Override
+			public void redo() {
+				execute();
+			}
+		};
+		assertEquals("half way",
+				assertThrows(IllegalStateException.class, () -> history.stack().execute(broken)).getMessage());
+		assertFalse(history.canUndo());
+		assertFalse(history.isDirty());
+	}
+
+	@Test
+	void aFrameworksCommandAndAnEditShareOneHistory() {
+		history.run(moveTo(11));
+		history.stack().execute(SetCommand.create(history.domain(), joint, GapwrightPackage.Literals.ELEMENT__NAME, "top"));
+		history.run(moveTo(12));
+		history.undo();
+		assertEquals("11 mm", joint.getX().text());
+		history.undo();
+		assertEquals(null, joint.getName());
+		assertEquals("11 mm", joint.getX().text());
+		history.undo();
+		assertEquals("10 mm", joint.getX().text());
+		assertFalse(history.isDirty());
+	}
+
+	@Test
+	void anErrorThrownHalfWayIsPutRightAsWell() {
+		Edit broken = new Edit("Break", joint, () -> {
+			joint.setX(mm(99));
+			throw new StackOverflowError();
+		});
+		assertThrows(StackOverflowError.class, () -> history.run(broken));
+		assertEquals("10 mm", joint.getX().text());
 	}
 }
