@@ -8,6 +8,7 @@ import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.ui.IWorkbenchPart;
+import org.eclipse.ui.PlatformUI;
 import org.eclipse.ui.views.properties.tabbed.AbstractPropertySection;
 import org.eclipse.ui.views.properties.tabbed.TabbedPropertySheetPage;
 
@@ -33,6 +34,7 @@ abstract class ElementSection extends AbstractPropertySection {
 	@Override
 	public final void createControls(Composite parent, TabbedPropertySheetPage page) {
 		super.createControls(parent, page);
+		PlatformUI.getWorkbench().getHelpSystem().setHelp(parent, "gapwright.help.properties");
 		area = new Composite(parent, SWT.NONE);
 		area.setLayout(new GridLayout());
 		Composite body = new Composite(area, SWT.NONE);
