@@ -10,7 +10,7 @@ import gapwright.ui.canvas.paint.Tone;
  */
 public record AirPathLook(double[] curve) implements Look {
 
-	private static final int PIECES = 16;
+	private static final int PIECES = 48;
 
 	/** @return the curve between two points; deviation in pixels to the side of the normal (-dy, dx) of the way */
 	public static AirPathLook between(double x1, double y1, double x2, double y2, double deviation) {

@@ -20,6 +20,7 @@ public record CoilLook(double[] toward, double[] away, double radius, boolean ma
 	/** Below this radius turns run together; they are drawn as a band. */
 	private static final double LEAST = 1.6;
 	private static final double LEAST_MARK = 3;
+	private static final double MOST_MARK = 12;
 
 	@Override
 	public double[] bounds() {
@@ -78,9 +79,9 @@ public record CoilLook(double[] toward, double[] away, double radius, boolean ma
 
 	private void mark(Pen pen, double x, double y, boolean dot) {
 		if (dot) {
-			pen.disc(x, y, Math.max(1, Math.min(2, radius * 0.25)), Tone.COIL, Tone.COIL, 1);
+			pen.disc(x, y, Math.max(1, Math.min(MOST_MARK / 2, radius * 0.22)), Tone.COIL, Tone.COIL, 1);
 		} else {
-			double arm = Math.min(3.2, radius * 0.42);
+			double arm = Math.min(MOST_MARK, radius * 0.42);
 			pen.line(new double[] { x - arm, y - arm, x + arm, y + arm }, Tone.COIL, 1.3, false);
 			pen.line(new double[] { x - arm, y + arm, x + arm, y - arm }, Tone.COIL, 1.3, false);
 		}

@@ -34,6 +34,8 @@ import gapwright.ui.fields.FigureFormat;
 final class LabelMaker {
 
 	private static final double TITLE = 12;
+	/** Peak over mean flux density from which it is said that the peak is shown. */
+	private static final double LEAST_SWING = 1.001;
 	private static final double SMALL = 11;
 	private static final double NEAR_BY = 6;
 	private static final double[] DISTANCES = { NEAR_BY, 26, 52 };
@@ -206,7 +208,9 @@ final class LabelMaker {
 		}
 		boolean loud = found.state() == LegState.NEAR || found.state() == LegState.OVER;
 		Tone tone = found.state() == LegState.OVER ? Tone.OVER : found.state() == LegState.NEAR ? Tone.NEAR : Tone.INK;
-		LabelLine density = new LabelLine(FigureFormat.fluxDensity(found.peakFluxDensity()), TITLE, true, tone);
+		boolean swings = found.peakFluxDensity() > Math.abs(found.fluxDensity()) * LEAST_SWING;
+		LabelLine density = new LabelLine(FigureFormat.fluxDensity(found.peakFluxDensity()) + (swings ? " peak" : ""),
+				TITLE, true, tone);
 		if (found.state() == LegState.UNKNOWN) {
 			return List.of(name, density, new LabelLine("saturation unknown", SMALL, false, Tone.NOTE));
 		}

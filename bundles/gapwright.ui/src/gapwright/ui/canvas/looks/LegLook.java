@@ -14,7 +14,7 @@ import gapwright.ui.canvas.paint.Tone;
  * @param width    of the bar
  * @param state    null while there is no result
  * @param fluxSign 1 along the axis, -1 against it, 0 for none
- * @param crossed  pixels along the axis at which a gap or magnet crosses it
+ * @param crossed  pixels along the axis at which a gap, a magnet or a joint lies on it
  */
 public record LegLook(double[] outline, double[] tube, double[] axis, double width, LegState state, int fluxSign,
 		double[] crossed)
@@ -22,8 +22,9 @@ public record LegLook(double[] outline, double[] tube, double[] axis, double wid
 
 	private static final double OUTER = 4;
 	private static final double CHEVRON_DISTANCE = 60;
+	private static final int MOST_CHEVRONS = 6;
 	private static final double CHEVRON_CLEAR = 28;
-	private static final double CROSSING = 14;
+	private static final double CROSSING = 19;
 
 	@Override
 	public double[] bounds() {
@@ -96,10 +97,17 @@ public record LegLook(double[] outline, double[] tube, double[] axis, double wid
 	private boolean isCrossed(int count, double clear, double length) {
 		for (int k = 0; k < count; k++) {
 			double at = length * (clear + (1 - 2 * clear) * (k + 0.5) / count);
-			for (double s : crossed) {
-				if (Math.abs(s - at) < CROSSING) {
-					return true;
-				}
+			if (isCrossed(at)) {
+				return true;
+			}
+		}
+		return false;
+	}
+
+	private boolean isCrossed(double at) {
+		for (double s : crossed) {
+			if (Math.abs(s - at) < CROSSING) {
+				return true;
 			}
 		}
 		return false;
@@ -117,11 +125,14 @@ public record LegLook(double[] outline, double[] tube, double[] axis, double wid
 		double uy = fluxSign * dy / length;
 		// the ends belong to the joints' rings
 		double clear = Math.min(CHEVRON_CLEAR, length / 5) / length;
-		int count = Math.max(1, (int) (length * (1 - 2 * clear) / CHEVRON_DISTANCE));
+		int count = Math.max(1, Math.min(MOST_CHEVRONS, (int) (length * (1 - 2 * clear) / CHEVRON_DISTANCE)));
 		// where a chevron would hide under a gap, one more moves them all off it
 		count += isCrossed(count, clear, length) ? 1 : 0;
 		for (int k = 0; k < count; k++) {
 			double share = clear + (1 - 2 * clear) * (k + 0.5) / count;
+			if (count > 1 && isCrossed(share * length)) {
+				continue;
+			}
 			double x = axis[0] + share * dx;
 			double y = axis[1] + share * dy;
 			double back = size / 1.3;

@@ -39,8 +39,9 @@ public record MagnetLook(double[] block, double[] arrow) implements Look {
 		dy /= length;
 		double[] head = { arrow[2] - HEAD * (dx - dy), arrow[3] - HEAD * (dy + dx), arrow[2], arrow[3],
 				arrow[2] - HEAD * (dx + dy), arrow[3] - HEAD * (dy - dx) };
-		pen.line(arrow, Tone.PAPER, 4, false);
-		pen.line(arrow, Tone.MAGNET, 2, false);
-		pen.line(head, Tone.MAGNET, 2, false);
+		pen.line(arrow, Tone.PAPER, 5, false);
+		pen.line(head, Tone.PAPER, 5, false);
+		pen.line(arrow, Tone.INK, 2, false);
+		pen.line(head, Tone.INK, 2, false);
 	}
 }

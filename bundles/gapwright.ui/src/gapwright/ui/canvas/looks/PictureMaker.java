@@ -142,7 +142,8 @@ public final class PictureMaker {
 	private double[] crossed(Bar bar) {
 		DoubleStream gaps = bar.leg().getGaps().stream().mapToDouble(Gap::getPosition);
 		Magnet magnet = bar.leg().getMagnet();
-		return DoubleStream.concat(gaps, magnet == null ? DoubleStream.empty() : DoubleStream.of(magnet.getPosition()))
+		DoubleStream joints = DoubleStream.of(0, 1);
+		return DoubleStream.concat(DoubleStream.concat(gaps, joints), magnet == null ? DoubleStream.empty() : DoubleStream.of(magnet.getPosition()))
 				.map(position -> scale.pixels(position * bar.length() - bar.start())).toArray();
 	}
 
