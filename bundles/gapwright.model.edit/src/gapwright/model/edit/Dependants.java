@@ -1,32 +1,50 @@
 package gapwright.model.edit;
 
 import java.util.ArrayDeque;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Deque;
+import java.util.HashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.util.EcoreUtil;
 
+import gapwright.model.AirPath;
 import gapwright.model.Coil;
 import gapwright.model.Design;
-import gapwright.model.Joint;
 import gapwright.model.Leg;
 import gapwright.model.Material;
-import gapwright.model.OperatingPoint;
 import gapwright.model.Winding;
 
 /** What cannot be without an element. */
 final class Dependants {
 
-	private final Design design;
+	/** What names an element and cannot be without it: legs by joint, coils by leg, drives by winding. */
+	private final Map<EObject, List<EObject>> needing = new HashMap<>();
 	private final Set<EObject> doomed = new LinkedHashSet<>();
 	private final Deque<EObject> open = new ArrayDeque<>();
 
 	private Dependants(Design design) {
-		this.design = design;
+		for (Leg leg : design.getLegs()) {
+			needs(leg, leg.getFrom());
+			needs(leg, leg.getTo());
+		}
+		for (AirPath path : design.getAirPaths()) {
+			needs(path, path.getFrom());
+			needs(path, path.getTo());
+		}
+		design.getWindings().forEach(winding -> winding.getCoils().forEach(coil -> needs(coil, coil.getLeg())));
+		design.getOperatingPoints().forEach(point -> point.getDrives().forEach(drive -> needs(drive, drive.getWinding())));
+	}
+
+	private void needs(EObject element, EObject needed) {
+		if (needed != null) {
+			needing.computeIfAbsent(needed, key -> new ArrayList<>()).add(element);
+		}
 	}
 
 	/** The elements and all that goes with them, without what lies inside something that goes anyway. */
@@ -63,20 +81,10 @@ final class Dependants {
 	}
 
 	private void follow(EObject element) {
-		if (element instanceof Joint joint) {
-			design.getLegs().stream().filter(leg -> leg.getFrom() == joint || leg.getTo() == joint).forEach(this::add);
-			design.getAirPaths().stream().filter(path -> path.getFrom() == joint || path.getTo() == joint).forEach(this::add);
-		} else if (element instanceof Leg leg) {
-			design.getWindings().forEach(
-					winding -> winding.getCoils().stream().filter(coil -> coil.getLeg() == leg).forEach(this::add));
-		} else if (element instanceof Coil coil && coil.eContainer() instanceof Winding winding) {
-			if (doomed.containsAll(winding.getCoils())) {
-				add(winding);
-			}
-		} else if (element instanceof Winding winding) {
-			for (OperatingPoint point : design.getOperatingPoints()) {
-				point.getDrives().stream().filter(drive -> drive.getWinding() == winding).forEach(this::add);
-			}
+		needing.getOrDefault(element, List.of()).forEach(this::add);
+		if (element instanceof Coil coil && coil.eContainer() instanceof Winding winding
+				&& doomed.containsAll(winding.getCoils())) {
+			add(winding);
 		}
 	}
 

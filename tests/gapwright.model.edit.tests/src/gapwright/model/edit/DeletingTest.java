@@ -1,16 +1,19 @@
 package gapwright.model.edit;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertNotSame;
 import static org.junit.jupiter.api.Assertions.assertNull;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Random;
 import java.util.Set;
 import java.util.TreeSet;
 
 import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.util.EcoreUtil;
 import org.junit.jupiter.api.Test;
 
 import gapwright.model.Design;
@@ -75,6 +78,31 @@ class DeletingTest {
 			new EditHistory().run(DesignEdits.delete(List.of(Sample.<Element>get(design, id))));
 			// would not be written if it did
 			Sample.read(Sample.text(design));
+		}
+	}
+
+	@Test
+	void anySelectionDeletedLeavesAFileThatReadsAndIsBackAfterUndo() {
+		for (int seed = 0; seed < 300; seed++) {
+			Random random = new Random(seed);
+			Design design = Sample.design();
+			String before = Sample.text(design);
+			List<EObject> chosen = new ArrayList<>();
+			for (String id : new TreeSet<>(Ids.used(design))) {
+				if (random.nextInt(6) == 0) {
+					chosen.add(Sample.<Element>get(design, id));
+				}
+			}
+			if (chosen.isEmpty()) {
+				continue;
+			}
+			EditHistory history = new EditHistory();
+			history.run(DesignEdits.delete(chosen));
+			String after = Sample.text(design);
+			assertEquals(after, Sample.text(Sample.read(after)), "seed " + seed);
+			chosen.forEach(gone -> assertNotSame(design, EcoreUtil.getRootContainer(gone)));
+			history.undo();
+			assertEquals(before, Sample.text(design), "seed " + seed);
 		}
 	}
 
