@@ -1,5 +1,6 @@
 package gapwright.ui.session;
 
+import java.util.concurrent.CancellationException;
 import java.util.concurrent.Executor;
 import java.util.function.Consumer;
 
@@ -76,14 +77,20 @@ final class StudyRunner {
 
 		@Override
 		protected IStatus run(IProgressMonitor monitor) {
-			StudyResult result = Study.run(input, monitor::isCanceled);
+			StudyResult result;
+			try {
+				result = Study.run(input, monitor::isCanceled);
+			} catch (CancellationException e) {
+				// a newer state of the design has overtaken this one
+				return Status.CANCEL_STATUS;
+			}
 			ui.execute(() -> {
-				if (revision == newest && result != null) {
+				if (revision == newest) {
 					job = null;
 					taker.accept(result);
 				}
 			});
-			return monitor.isCanceled() ? Status.CANCEL_STATUS : Status.OK_STATUS;
+			return Status.OK_STATUS;
 		}
 	}
 }
