@@ -111,25 +111,9 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 		selection.changed();
 	}
 
-	/** Reads the file again and begins anew with it; what was undone or not saved is gone. */
-	void reload() {
-		close();
-		createPages();
-		setActivePage(0);
-		firePropertyChange(PROP_DIRTY);
-	}
-
-	private void close() {
-		watch.dispose();
-		while (getPageCount() > 0) {
-			removePage(0);
-		}
-		if (session != null) {
-			session.dispose();
-			session = null;
-		}
-		forms = null;
-		canvas = null;
+	/** @return the page in front, to be shown again by {@link #showPage} */
+	int frontPage() {
+		return getActivePage();
 	}
 
 	@Override
@@ -199,7 +183,9 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 
 	/** @param index 0 the canvas, then the form pages in their order */
 	public void showPage(int index) {
-		setActivePage(index);
+		if (index >= 0 && index < getPageCount()) {
+			setActivePage(index);
+		}
 	}
 
 	@Override

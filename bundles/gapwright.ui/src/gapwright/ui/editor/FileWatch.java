@@ -75,7 +75,7 @@ final class FileWatch implements IResourceChangeListener {
 		stamp = now;
 		if (!editor.isDirty() || MessageDialog.openQuestion(editor.getSite().getShell(), "File changed",
 				"'" + editor.file().name() + "' was changed by another program. Read it again? Your unsaved changes would be lost.")) {
-			editor.reload();
+			Reopening.of(editor);
 		} else {
 			editor.session().history().markUnsaved();
 		}

@@ -38,7 +38,7 @@ final class UnreadablePage extends Composite {
 			Headings.note(this, reason.getMessage() == null ? reason.toString() : reason.getMessage(), 2);
 		}
 		button("Open as text", () -> openAsText(editor));
-		button("Read again", editor::reload);
+		button("Read again", () -> getDisplay().asyncExec(() -> Reopening.of(editor)));
 	}
 
 	private void table(List<ReadProblem> problems) {
