@@ -46,6 +46,7 @@ final class Workbench {
 
 	/** Our perspective as it comes, in a window of a decent size, in front. */
 	static void start() throws WorkbenchException {
+		LoggedErrors.forget();
 		IWorkbenchPage page = PlatformUI.getWorkbench().showPerspective("gapwright.ui.perspective", PlatformUI.getWorkbench().getActiveWorkbenchWindow());
 		if (page.findView("org.eclipse.ui.internal.introview") != null) {
 			page.hideView(page.findView("org.eclipse.ui.internal.introview"));
@@ -97,9 +98,11 @@ final class Workbench {
 		return view;
 	}
 
+	/** Closes all editors without saving; fails when an exception went to the log since {@link #start}. */
 	static void closeAll() {
 		page().closeAllEditors(false);
 		settle();
+		LoggedErrors.assertNone();
 	}
 
 	/** Works off all events that are waiting. */
