@@ -53,7 +53,16 @@ public final class CanvasModel {
 
 	/** @return a picture of the design as it is at another scale */
 	public Picture pictureAt(CanvasScale other) {
-		return new PictureMaker(session.design(), session.operatingPoint(), session.pointResult(), other, measure).make();
+		return maker(other).make();
+	}
+
+	/** @return the same without labels */
+	public Picture drawingAt(CanvasScale other) {
+		return maker(other).makeDrawing();
+	}
+
+	private PictureMaker maker(CanvasScale at) {
+		return new PictureMaker(session.design(), session.operatingPoint(), session.pointResult(), at, measure);
 	}
 
 	/** The picture is made anew when it is next asked for; listeners are told at once. */

@@ -59,7 +59,7 @@ final class Thumbnail extends Canvas {
 		double now = canvas.scale().pixelsPerMillimetre();
 		double factor = Math.min((area.width - 2 * MARGIN) / box[2], (area.height - 2 * MARGIN) / box[3]);
 		small = new CanvasScale(Math.max(0.01, now * factor));
-		Picture picture = canvas.pictureAt(small);
+		Picture picture = canvas.drawingAt(small);
 		double[] bounds = picture.drawingBounds();
 		left = bounds[0] - (area.width - bounds[2]) / 2;
 		top = bounds[1] - (area.height - bounds[3]) / 2;

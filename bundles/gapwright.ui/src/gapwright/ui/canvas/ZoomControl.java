@@ -77,7 +77,7 @@ public final class ZoomControl {
 		fitting = true;
 		org.eclipse.swt.graphics.Rectangle room = control.getClientArea();
 		// labels keep their size at every zoom: room is left for them round the drawing
-		double[] full = canvas.pictureAt(CanvasScale.zoom(1)).drawingBounds();
+		double[] full = canvas.drawingAt(CanvasScale.zoom(1)).drawingBounds();
 		if (full[2] <= 0 || full[3] <= 0) {
 			return;
 		}

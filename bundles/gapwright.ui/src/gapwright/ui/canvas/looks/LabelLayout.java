@@ -1,6 +1,5 @@
 package gapwright.ui.canvas.looks;
 
-import java.util.ArrayList;
 import java.util.List;
 
 import gapwright.ui.canvas.paint.Align;
@@ -17,8 +16,8 @@ public final class LabelLayout {
 
 	private static final double STEP = 3;
 
-	private final List<double[]> taken = new ArrayList<>();
-	private final List<double[]> iron = new ArrayList<>();
+	private final BoxGrid taken = new BoxGrid();
+	private final BoxGrid iron = new BoxGrid();
 
 	/** Keeps labels off a box of left, top, width, height. */
 	public void block(double[] box) {
@@ -42,10 +41,8 @@ public final class LabelLayout {
 		for (double s = STEP; s < length; s += STEP) {
 			double px = leader[0] + s * dx / length;
 			double py = leader[1] + s * dy / length;
-			for (double[] box : iron) {
-				if (px > box[0] && px < box[0] + box[2] && py > box[1] && py < box[1] + box[3]) {
-					return true;
-				}
+			if (iron.covers(px, py)) {
+				return true;
 			}
 		}
 		return false;
@@ -59,7 +56,7 @@ public final class LabelLayout {
 	public Placed place(List<Place> places, double width, double height) {
 		for (Place place : places) {
 			double[] box = box(place, width, height);
-			if (!crossesIron(place.leader()) && taken.stream().noneMatch(other -> Shapes.overlap(box, other))) {
+			if (!taken.overlaps(box) && !crossesIron(place.leader())) {
 				blockIron(new double[] { box[0] - 2, box[1] - 1, box[2] + 4, box[3] + 2 });
 				if (place.leader().length > 0) {
 					block(Shapes.bounds(2, place.leader()));

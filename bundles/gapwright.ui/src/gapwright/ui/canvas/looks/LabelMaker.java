@@ -2,6 +2,7 @@ package gapwright.ui.canvas.looks;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.IdentityHashMap;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -85,7 +86,9 @@ final class LabelMaker {
 		}
 		List<Bar> bars = new ArrayList<>();
 		scene.bars().forEach(bars::add);
-		bars.sort(Comparator.comparingDouble((Bar bar) -> -urgency(bar.leg())));
+		Map<Bar, Double> urgency = new IdentityHashMap<>();
+		bars.forEach(bar -> urgency.put(bar, urgency(bar.leg())));
+		bars.sort(Comparator.comparingDouble((Bar bar) -> -urgency.get(bar)));
 		for (Bar bar : bars) {
 			leg(bar, middle);
 		}

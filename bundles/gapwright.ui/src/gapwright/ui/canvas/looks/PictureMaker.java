@@ -59,7 +59,15 @@ public final class PictureMaker {
 		scene = new Scene(design);
 	}
 
+	/** @return drawing and labels */
 	public Picture make() {
+		makeDrawing();
+		new LabelMaker(design, point, result, scale, measure, scene, picture, build).make();
+		return picture;
+	}
+
+	/** @return the drawing alone, for where labels cannot be read */
+	public Picture makeDrawing() {
 		for (Bar bar : scene.bars()) {
 			picture.add(bar.leg(), leg(bar));
 		}
@@ -80,7 +88,6 @@ public final class PictureMaker {
 				picture.add(joint, new JointLook(x, y));
 			}
 		}
-		new LabelMaker(design, point, result, scale, measure, scene, picture, build).make();
 		return picture;
 	}
 
