@@ -13,12 +13,13 @@ import org.eclipse.swt.widgets.Event;
 public final class ZoomControl {
 
 	private static final double STEP = 1.25;
-	private static final int MARGIN = 24;
-	/** Room for labels on either side, px. */
-	private static final int BESIDE = 130;
-	/** Room for labels above and below, px. */
-	private static final int ABOVE = 85;
+	/** Kept free round a fitted picture, px. */
+	private static final int MARGIN = 6;
 	private static final double MOST_FIT = 2;
+	/** A fit goes no smaller: labels alone would fill a tiny canvas. */
+	private static final double LEAST_FIT = 0.1;
+	private static final double BIGGEST_STEP = 0.75;
+	private static final double SMALLEST_STEP = 0.97;
 
 	private final FigureCanvas control;
 	private final CanvasModel canvas;
@@ -67,23 +68,31 @@ public final class ZoomControl {
 
 	/** The control has another size. */
 	void resized() {
-		if (fitting && control.getClientArea().width > 2 * MARGIN) {
+		if (fitting && control.getClientArea().width > 4 * MARGIN && control.getClientArea().height > 4 * MARGIN) {
 			fit();
 		}
+	}
+
+	/** How many times larger than the room the picture is. */
+	private double over(double zoom, org.eclipse.swt.graphics.Rectangle room) {
+		double[] box = canvas.pictureAt(CanvasScale.zoom(zoom)).bounds();
+		return Math.max(box[2] / (room.width - 2 * MARGIN), box[3] / (room.height - 2 * MARGIN));
 	}
 
 	/** Shows the whole drawing with its labels as large as it goes, at most at 200 %. */
 	public void fit() {
 		fitting = true;
 		org.eclipse.swt.graphics.Rectangle room = control.getClientArea();
-		// labels keep their size at every zoom: room is left for them round the drawing
 		double[] full = canvas.drawingAt(CanvasScale.zoom(1)).drawingBounds();
 		if (full[2] <= 0 || full[3] <= 0) {
 			return;
 		}
-		double zoom = Math.min(Math.max(room.width - 2 * BESIDE, room.width / 3) / full[2],
-				Math.max(room.height - 2 * ABOVE, room.height / 3) / full[3]);
-		canvas.setScale(CanvasScale.zoom(Math.min(MOST_FIT, zoom)));
+		double zoom = Math.min(MOST_FIT, Math.min(room.width / full[2], room.height / full[3]));
+		// labels keep their size at every zoom and find other places: only a try shows what room they take
+		for (double over = over(zoom, room); over > 1 && zoom > LEAST_FIT; over = over(zoom, room)) {
+			zoom *= Math.max(BIGGEST_STEP, Math.min(SMALLEST_STEP, 1 / over));
+		}
+		canvas.setScale(CanvasScale.zoom(zoom));
 		control.getLightweightSystem().getUpdateManager().performUpdate();
 		double[] box = canvas.picture().bounds();
 		Rectangle all = new Rectangle((int) box[0], (int) box[1], (int) box[2], (int) box[3]);

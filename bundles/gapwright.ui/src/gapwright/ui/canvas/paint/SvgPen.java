@@ -54,12 +54,16 @@ public final class SvgPen implements Pen {
 
 	@Override
 	public void text(String text, double x, double y, Align align, double size, boolean bold, Tone tone) {
+		String weight = bold ? " font-weight=\"bold\"" : "";
 		String anchor = align == Align.START ? "start" : align == Align.MIDDLE ? "middle" : "end";
+		// the halo is a text of its own: not every reader of SVG knows the order of painting within one
 		body.append(format(
-				"<text x=\"%s\" y=\"%s\" text-anchor=\"%s\" font-size=\"%s\"%s fill=\"%s\" paint-order=\"stroke\""
-						+ " stroke=\"%s\" stroke-width=\"3\">%s</text>%n",
-				n(x), n(y), anchor, n(size), bold ? " font-weight=\"bold\"" : "", colour.apply(tone),
-				colour.apply(Tone.PAPER), escape(text)));
+				"<text x=\"%s\" y=\"%s\" text-anchor=\"%s\" font-size=\"%s\"%s fill=\"none\" stroke=\"%s\" stroke-width=\"3\""
+						+ " stroke-linejoin=\"round\" aria-hidden=\"true\">%s</text>%n",
+				n(x), n(y), anchor, n(size), weight, colour.apply(Tone.PAPER), escape(text)));
+		body.append(format(
+				"<text x=\"%s\" y=\"%s\" text-anchor=\"%s\" font-size=\"%s\"%s fill=\"%s\">%s</text>%n", n(x), n(y), anchor,
+				n(size), weight, colour.apply(tone), escape(text)));
 	}
 
 	@Override
