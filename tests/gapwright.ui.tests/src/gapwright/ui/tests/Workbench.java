@@ -2,6 +2,8 @@ package gapwright.ui.tests;
 
 import java.io.ByteArrayInputStream;
 import java.io.InputStream;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.function.BooleanSupplier;
 import java.util.function.Predicate;
 
@@ -139,9 +141,9 @@ final class Workbench {
 
 	/** Types characters as a keyboard would. */
 	static void type(String text) {
-		for (char c : text.toCharArray()) {
-			key(c, 0);
-		}
+		List<String> command = new ArrayList<>(List.of("key"));
+		text.chars().forEach(c -> command.add(keyName(c)));
+		RealEvents.send(command.toArray(String[]::new));
 	}
 
 	/** Presses and releases a key. Pass a character, or a key code of SWT. */
