@@ -93,6 +93,11 @@ public final class DesignCheck {
 				problems.add(ProblemCode.GAP_ZERO, gap, GAP__LENGTH, "a gap of length 0 is no gap", "");
 			}
 		}
+		double ironArea = LegGeometry.grossArea(leg) * leg.getStackingFactor();
+		if (ironArea == 0 && LegGeometry.drawnWidth(leg) > 0 && leg.getStackingFactor() > 0 || Double.isInfinite(ironArea)) {
+			problems.add(ProblemCode.VALUE_OUT_OF_DOMAIN, leg, null, "the area of iron is out of the range of numbers",
+					"Check the units of its section.");
+		}
 		double inserted = LegGeometry.insertedLength(leg);
 		double distance = LegGeometry.jointDistance(leg);
 		double iron = LegGeometry.ironLength(leg);

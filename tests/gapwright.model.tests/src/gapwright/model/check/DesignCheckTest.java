@@ -137,6 +137,9 @@ class DesignCheckTest {
 				"ERROR gap-longer-than-leg wound: gaps and magnet take 45 mm of the 40 mm between the joints | Shorten them or move the joints apart.");
 		fault("pathLength=\"90 mm\"/>", "pathLength=\"90 mm\"><gaps id=\"long\" length=\"50 mm\"/></legs>",
 				"NOTE gap-longer-than-drawn back: gaps and magnet take 50 mm, but the leg is drawn 40 mm long; its path length as given is what counts | ");
+		fault("width=\"12 mm\" depth=\"15 mm\">", "width=\"12 mm\" depth=\"15 mm\" stackingFactor=\"5e-324\">",
+				"WARNING value-implausible wound: stackingFactor = '4.9E-324': units? Usual is 0.5 to 1 | ",
+				"ERROR value-out-of-domain wound: the area of iron is out of the range of numbers | Check the units of its section.");
 		fault("length=\"0.80 mm\"", "length=\"0 mm\"", "NOTE gap-zero gap: a gap of length 0 is no gap | ");
 		fault("length=\"0.80 mm\"/>", "length=\"0.80 mm\"/><magnet id=\"m\" length=\"0 mm\" remanence=\"-1 T\" recoilPermeability=\"0.9\"/>",
 				"ERROR value-out-of-domain m: length = '0 mm': must be above 0 | ",
