@@ -47,7 +47,7 @@ class NetworkLawsTest {
 				leaving[n.to(k)] -= flux;
 			}
 			double scale = Math.max(largest(s.legFlux()), largest(s.airFlux()));
-			assertTrue(largest(leaving) <= Math.max(1e-11 * scale, 1e-17), c + ": " + largest(leaving) / scale);
+			assertTrue(largest(leaving) <= Math.max(1e-12 * scale, 1e-18), c + ": " + largest(leaving) / scale);
 		}, SMALL, LARGE, MAGNETS);
 	}
 
