@@ -132,11 +132,8 @@ abstract class DesignView extends ViewPart implements ITabbedPropertySheetPageCo
 		}
 		String trouble = session == null ? "Open a Gapwright design to see " + subject() + " here." : session.trouble();
 		if (trouble.isEmpty()) {
-			String text = session.design().getName() + "  ·  " + FeatureText.name(session.operatingPoint()) + "  ·  " + session.operatingPoint().getTemperature();
-			if (!text.equals(heading.getText())) {
-				heading.setText(text);
-			}
 			showResult(session);
+			title();
 			select(session.selection().selected());
 		} else {
 			clear();
@@ -148,6 +145,19 @@ abstract class DesignView extends ViewPart implements ITabbedPropertySheetPageCo
 			stack.layout();
 		}
 	}
+
+	/** The heading: what is shown, and what is not. */
+	final void title() {
+		String name = session.design().getName();
+		String text = (name == null || name.isBlank() ? "Design without a name" : name) + "  ·  " + FeatureText.name(session.operatingPoint())
+				+ "  ·  " + session.operatingPoint().getTemperature() + note();
+		if (!text.equals(heading.getText())) {
+			heading.setText(text);
+		}
+	}
+
+	/** What the table leaves out; empty when nothing. */
+	abstract String note();
 
 	/** Rows were selected here: the canvas and the Properties view follow. */
 	final void publish(List<? extends EObject> elements) {

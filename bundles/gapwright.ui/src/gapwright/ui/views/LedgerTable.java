@@ -28,6 +28,9 @@ import org.eclipse.swt.widgets.TableItem;
  */
 final class LedgerTable<R> {
 
+	/** Rows on the screen at once: filling more would hold up the window. What is copied is never cut short. */
+	static final int MOST = 2000;
+
 	private final Table table;
 	private final List<LedgerColumn<R>> columns;
 	private final LedgerOrder<R> order = new LedgerOrder<>();
@@ -93,10 +96,11 @@ final class LedgerTable<R> {
 		design = List.copyOf(next);
 		rows = order.sorted(design);
 		table.setRedraw(false);
-		if (table.getItemCount() > rows.size()) {
-			table.remove(rows.size(), table.getItemCount() - 1);
+		int shown = Math.min(rows.size(), MOST);
+		if (table.getItemCount() > shown) {
+			table.remove(shown, table.getItemCount() - 1);
 		}
-		for (int index = 0; index < rows.size(); index++) {
+		for (int index = 0; index < shown; index++) {
 			fill(index < table.getItemCount() ? table.getItem(index) : new TableItem(table, SWT.NONE), rows.get(index));
 		}
 		table.setRedraw(true);
@@ -115,6 +119,11 @@ final class LedgerTable<R> {
 			}
 		}
 		item.setData(shown);
+	}
+
+	/** Says what is not on the screen; empty when all is. */
+	String note() {
+		return rows.size() <= MOST ? "" : "  ·  the first " + MOST + " of " + rows.size() + " rows in this order; Copy all rows takes every one";
 	}
 
 	/** In the order shown. */
@@ -141,7 +150,7 @@ final class LedgerTable<R> {
 	/** Selects these rows and scrolls to the first, without telling the listener. */
 	void select(List<R> wanted) {
 		Set<R> set = new LinkedHashSet<>(wanted);
-		int[] indices = IntStream.range(0, rows.size()).filter(k -> set.contains(rows.get(k))).toArray();
+		int[] indices = IntStream.range(0, Math.min(rows.size(), MOST)).filter(k -> set.contains(rows.get(k))).toArray();
 		int[] before = sortedSelection();
 		if (!Arrays.equals(before, indices)) {
 			table.setSelection(indices);

@@ -39,6 +39,11 @@ public final class LegLedger extends DesignView {
 	}
 
 	@Override
+	String note() {
+		return table.note();
+	}
+
+	@Override
 	void clear() {
 		table.show(List.of());
 	}

@@ -43,6 +43,11 @@ public final class WindingLedger extends DesignView {
 	}
 
 	@Override
+	String note() {
+		return table.note();
+	}
+
+	@Override
 	void clear() {
 		table.show(List.of());
 		matrix.clear();

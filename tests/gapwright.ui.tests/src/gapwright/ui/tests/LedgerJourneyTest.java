@@ -160,6 +160,25 @@ class LedgerJourneyTest {
 	}
 
 	@Test
+	void aDesignOfManyLegsShowsTheFirstOfThemSaysSoAndCopiesAll() throws Exception {
+		editor = Workbench.open(Workbench.file("lattice.gapwright", Lattice.bytes(35)));
+		design = editor.session().design();
+		Workbench.page().showView(LegLedger.ID);
+		Workbench.await("the result", () -> editor.session().pointResult() != null);
+		Table table = Forms.table(UTILISATION);
+		assertTrue(design.getLegs().size() > 2000);
+		assertEquals(2000, table.getItemCount());
+		assertTrue(Forms.says("the first 2000 of " + design.getLegs().size() + " rows"));
+		Workbench.focus(table);
+		table.deselectAll();
+		Workbench.key('c', SWT.MOD1);
+		Clipboard clipboard = new Clipboard(table.getDisplay());
+		String copied = (String) clipboard.getContents(TextTransfer.getInstance());
+		clipboard.dispose();
+		assertEquals(1 + design.getLegs().size(), copied.split("\n").length);
+	}
+
+	@Test
 	void withoutAnEditorTheViewSaysWhatToOpen() throws Exception {
 		open("boost-choke.gapwright", LegLedger.ID);
 		Workbench.closeAll();
