@@ -1,7 +1,5 @@
 package gapwright.model;
 
-import java.io.ByteArrayInputStream;
-import java.io.StringReader;
 import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
@@ -14,10 +12,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 
-import javax.xml.stream.XMLInputFactory;
 import javax.xml.stream.XMLStreamConstants;
 import javax.xml.stream.XMLStreamException;
 import javax.xml.stream.XMLStreamReader;
@@ -38,7 +33,6 @@ final class FileChecker {
 	private static final String XSI = "http://www.w3.org/2001/XMLSchema-instance";
 	private static final String FAMILY = "urn:gapwright:design:";
 	private static final String ELSEWHERE = "a design must not refer to other files";
-	private static final Pattern WORDLESS = Pattern.compile("http://www\\.w3\\.org/\\S*#(\\w+)\\?(\\S*)");
 	/** A file with more wrong than this is no design; the rest would only hide the cause. */
 	private static final int MOST_PROBLEMS = 100;
 
@@ -91,16 +85,8 @@ final class FileChecker {
 	}
 
 	private void read(String text) {
-		XMLInputFactory factory = XMLInputFactory.newDefaultFactory();
-		factory.setProperty(XMLInputFactory.IS_NAMESPACE_AWARE, true);
-		factory.setProperty(XMLInputFactory.IS_SUPPORTING_EXTERNAL_ENTITIES, false);
-		factory.setProperty(XMLInputFactory.SUPPORT_DTD, false);
-		factory.setXMLResolver((publicId, systemId, base, namespace) -> new ByteArrayInputStream(new byte[0]));
-		factory.setXMLReporter((message, error, information, location) -> {
-			// whatever matters arrives as an exception; the parser would print it as well
-		});
 		try {
-			XMLStreamReader xml = factory.createXMLStreamReader(new StringReader(text));
+			XMLStreamReader xml = HardenedXml.reader(text);
 			String encoding = xml.getCharacterEncodingScheme();
 			if (encoding != null && !encoding.equalsIgnoreCase("UTF-8")) {
 				add(1, "", "", "encoding=\"" + clip(encoding) + "\"", "a design is written in UTF-8");
@@ -113,11 +99,11 @@ final class FileChecker {
 			}
 		} catch (XMLStreamException e) {
 			int line = e.getLocation() == null ? 0 : Math.max(0, e.getLocation().getLineNumber());
-			add(line, "", "", "", "truncated or malformed XML: " + plain(e.getMessage()));
+			add(line, "", "", "", "truncated or malformed XML: " + XmlTrouble.inWords(e.getMessage()));
 			return;
 		} catch (RuntimeException e) {
 			// the parser's own failure
-			add(0, "", "", "", "not readable as XML: " + plain(String.valueOf(e.getMessage())));
+			add(0, "", "", "", "not readable as XML: " + XmlTrouble.inWords(String.valueOf(e.getMessage())));
 			return;
 		}
 		resolve();
@@ -176,7 +162,7 @@ final class FileChecker {
 		EStructuralFeature feature = parent.type().getEStructuralFeature(tag);
 		if (!(feature instanceof EReference reference) || !reference.isContainment()) {
 			add(line, parent.name(), "", tag, feature == null
-					? "no such element in " + article(parent.type()) + ", allowed are " + children(parent.type())
+					? "no such element in " + ModelWords.article(parent.type()) + ", allowed are " + ModelWords.children(parent.type())
 					: "must be written as an attribute");
 			return skip(xml);
 		}
@@ -198,7 +184,7 @@ final class FileChecker {
 			if (!expected.isAbstract()) {
 				return expected;
 			}
-			add(line, open.peek().name(), "xsi:type", "", "missing, allowed are " + concrete(expected));
+			add(line, open.peek().name(), "xsi:type", "", "missing, allowed are " + ModelWords.concrete(expected));
 			return null;
 		}
 		String name = given.substring(given.indexOf(':') + 1);
@@ -208,8 +194,8 @@ final class FileChecker {
 		if (found instanceof EClass type && !type.isAbstract() && expected.isSuperTypeOf(type)) {
 			return type;
 		}
-		add(line, open.peek().name(), "xsi:type", given, "no such " + words(reference.getName()) + ", allowed are "
-				+ concrete(expected));
+		add(line, open.peek().name(), "xsi:type", given, "no such " + ModelWords.words(reference.getName()) + ", allowed are "
+				+ ModelWords.concrete(expected));
 		return null;
 	}
 
@@ -254,7 +240,7 @@ final class FileChecker {
 		}
 		Known before = known.putIfAbsent(id, new Known(type, line));
 		if (before != null) {
-			add(line, name, "id", id, "given twice, also to " + article(before.type()) + " in line " + before.line());
+			add(line, name, "id", id, "given twice, also to " + ModelWords.article(before.type()) + " in line " + before.line());
 		}
 	}
 
@@ -273,7 +259,7 @@ final class FileChecker {
 			}
 		} else {
 			add(line, element, name, clip(value),
-					"no such attribute in " + article(type) + ", allowed are " + attributes(type));
+					"no such attribute in " + ModelWords.article(type) + ", allowed are " + ModelWords.attributes(type));
 		}
 	}
 
@@ -283,12 +269,12 @@ final class FileChecker {
 			Known target = known.get(reference.id());
 			if (target == null) {
 				add(reference.line(), reference.element(), reference.feature().getName(), clip(reference.id()),
-						"there is no " + words(expected.getName()) + " with this id" + (reference.id().contains("#")
+						"there is no " + ModelWords.words(expected.getName()) + " with this id" + (reference.id().contains("#")
 								? "; " + ELSEWHERE
 								: ""));
 			} else if (!expected.isSuperTypeOf(target.type())) {
 				add(reference.line(), reference.element(), reference.feature().getName(), reference.id(),
-						"that is " + article(target.type()) + ", expected " + article(expected));
+						"that is " + ModelWords.article(target.type()) + ", expected " + ModelWords.article(expected));
 			}
 		}
 	}
@@ -304,7 +290,7 @@ final class FileChecker {
 			}
 			return true;
 		} catch (XMLStreamException e) {
-			add(e.getLocation().getLineNumber(), "", "", "", "truncated or malformed XML: " + plain(e.getMessage()));
+			add(e.getLocation().getLineNumber(), "", "", "", "truncated or malformed XML: " + XmlTrouble.inWords(e.getMessage()));
 			return false;
 		}
 	}
@@ -315,54 +301,9 @@ final class FileChecker {
 		}
 	}
 
-	private static String plain(String message) {
-		int at = message.indexOf("Message: ");
-		String plain = (at < 0 ? message : message.substring(at + 9)).strip();
-		Matcher wordless = WORDLESS.matcher(plain);
-		return wordless.find() ? inWords(wordless.group(1), wordless.group(2).split("&")) : clip(plain);
-	}
-
-	/** The JDK's reader has no words for its errors with names and namespaces; it prints an address instead. */
-	private static String inWords(String error, String[] names) {
-		String last = clip(names[error.equals("ElementPrefixUnbound") ? 0 : names.length - 1]);
-		return error.endsWith("NotUnique")
-				? "the attribute " + clip(names[Math.min(1, names.length - 1)]) + " is given twice in one element"
-				: error.endsWith("PrefixUnbound") ? "the prefix " + last + " is not declared by an xmlns:" + last
-						: "the name " + last + " is not allowed (" + words(error) + ")";
-	}
-
-	private static String clip(String text) {
+	/** One line, not endlessly long. */
+	static String clip(String text) {
 		String oneLine = text.strip().replaceAll("\\s+", " ");
 		return oneLine.length() > 200 ? oneLine.substring(0, 200) + "…" : oneLine;
-	}
-
-	private static String article(EClass type) {
-		String words = words(type.getName());
-		return ("aeiou".indexOf(words.charAt(0)) >= 0 ? "an " : "a ") + words;
-	}
-
-	/** "OperatingPoint" becomes "operating point". */
-	private static String words(String name) {
-		return name.replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
-	}
-
-	private static String concrete(EClass type) {
-		List<String> names = new ArrayList<>();
-		for (EClassifier classifier : GapwrightPackage.eINSTANCE.getEClassifiers()) {
-			if (classifier instanceof EClass each && !each.isAbstract() && type.isSuperTypeOf(each)) {
-				names.add("gapwright:" + each.getName());
-			}
-		}
-		return String.join(", ", names);
-	}
-
-	private static String attributes(EClass type) {
-		return String.join(", ", type.getEAllStructuralFeatures().stream()
-				.filter(f -> !(f instanceof EReference r) || !r.isContainment()).map(f -> f.getName()).toList());
-	}
-
-	private static String children(EClass type) {
-		List<String> names = type.getEAllContainments().stream().map(f -> f.getName()).toList();
-		return names.isEmpty() ? "none" : String.join(", ", names);
 	}
 }
