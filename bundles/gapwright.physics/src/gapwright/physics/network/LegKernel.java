@@ -64,7 +64,11 @@ final class LegKernel {
 
 	/** @return dφ/df, H: A·B′/(l + R·A·B′) */
 	static double conductance(double slope, double length, double area, double reluctance) {
-		double floored = Math.max(slope, LEAST_SLOPE);
+		double floored = flooredSlope(slope);
 		return area * floored / (length + reluctance * area * floored);
+	}
+
+	static double flooredSlope(double slope) {
+		return Math.max(slope, LEAST_SLOPE);
 	}
 }

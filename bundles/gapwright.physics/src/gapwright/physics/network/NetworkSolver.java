@@ -48,6 +48,20 @@ public final class NetworkSolver {
 	public NetworkSolver(Network network) {
 		this.network = network;
 		topology = new Topology(network);
+		factor = factor(network, topology);
+		int branches = network.branchCount();
+		int unknowns = topology.unknowns();
+		inductances = new Inductances(network, topology, new CoilTable(network));
+		none = new ImposedLinkages(Excitation.currents(), inductances);
+		conductance = new double[branches];
+		potentialStep = new double[unknowns];
+		currentStep = new double[network.windingCount()];
+		state = new State(network, topology);
+		trial = new State(network, topology);
+	}
+
+	/** @return the factor of the Jacobian that suits the network's size, without numbers as yet */
+	static SymmetricFactor factor(Network network, Topology topology) {
 		int branches = network.branchCount();
 		int[] first = new int[branches];
 		int[] second = new int[branches];
@@ -57,15 +71,8 @@ public final class NetworkSolver {
 			second[k] = bridge[k] ? Topology.GROUND : topology.unknown()[network.to(k)];
 		}
 		int unknowns = topology.unknowns();
-		factor = unknowns <= DENSE_UP_TO ? new DenseFactor(unknowns, first, second)
+		return unknowns <= DENSE_UP_TO ? new DenseFactor(unknowns, first, second)
 				: new SparseFactor(unknowns, first, second);
-		inductances = new Inductances(network, topology, new CoilTable(network));
-		none = new ImposedLinkages(Excitation.currents(), inductances);
-		conductance = new double[branches];
-		potentialStep = new double[unknowns];
-		currentStep = new double[network.windingCount()];
-		state = new State(network, topology);
-		trial = new State(network, topology);
 	}
 
 	public Network network() {

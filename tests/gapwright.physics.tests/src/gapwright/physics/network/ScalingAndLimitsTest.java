@@ -149,6 +149,10 @@ class ScalingAndLimitsTest {
 			assertEquals(0, with.legFlux()[dead], 0);
 			assertClose(without.legFlux(), Arrays.copyOf(with.legFlux(), n.legCount()), 1e-13, c);
 			assertClose(without.linkage(), with.linkage(), 1e-12, c);
+			// beyond the joint where it is met at its far end, the sources alone set the potential
+			double sources = 100 + 25 * c.current()[0];
+			double[] u = with.jointPotential();
+			assertEquals(sources, u[first] - u[second], 1e-12 * (Math.abs(sources) + largest(u)), c.toString());
 		}
 	}
 
