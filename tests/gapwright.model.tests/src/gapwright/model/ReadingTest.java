@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
+import java.io.InputStream;
 import java.net.InetAddress;
 import java.net.ServerSocket;
 import java.net.SocketTimeoutException;
@@ -278,6 +279,25 @@ class ReadingTest {
 		refuses("initialPermeability=\"2300.0\"", "initialPermeability=\"" + "1".repeat(500_000) + "\"",
 				"small.gapwright:ferrite/KneeCurve: initialPermeability = '" + "1".repeat(200)
 						+ "…': too long for a number (line 4)");
+	}
+
+	@Test
+	void aStreamWithoutEndIsGivenUp() {
+		InputStream endless = new InputStream() {
+
+			@Override
+			public int read() {
+				return 'x';
+			}
+
+			@Override
+			public int read(byte[] buffer, int from, int length) {
+				Arrays.fill(buffer, from, from + length, (byte) 'x');
+				return length;
+			}
+		};
+		assertEquals("endless: larger than 64 MiB, not a design",
+				assertThrows(UnreadableDesignException.class, () -> DesignReader.read(endless, "endless")).getMessage());
 	}
 
 	@Test

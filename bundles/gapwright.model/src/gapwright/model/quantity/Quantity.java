@@ -51,18 +51,15 @@ public final class Quantity {
 				return new Quantity(typed, expected, diameter(typed, Integer.parseInt(gauge.group(1))));
 			}
 		}
-		QuantityFormatException misspelt = Misspelling.of(typed, expected);
-		if (misspelt != null) {
-			throw misspelt;
-		}
 		Matcher parts = NUMBER_AND_UNIT.matcher(typed);
 		if (!parts.matches()) {
+			refuseMisspelling(typed, expected);
 			throw new QuantityFormatException(text, "not a number with a unit", "e.g. " + expected.example());
 		}
 		if (parts.group(2).isEmpty()) {
 			throw new QuantityFormatException(text, expected.noun() + " needs a unit", "e.g. " + expected.example());
 		}
-		Units.Unit unit = unit(text, parts.group(2), expected);
+		Units.Unit unit = unit(typed, parts.group(2), expected);
 		BigDecimal magnitude = new BigDecimal(parts.group(1).replace('\u2212', '-'));
 		double si = magnitude.add(unit.offset()).multiply(unit.factor()).doubleValue();
 		if (Double.isInfinite(si) || si == 0 && magnitude.add(unit.offset()).signum() != 0) {
@@ -71,10 +68,18 @@ public final class Quantity {
 		return new Quantity(typed, expected, si);
 	}
 
+	private static void refuseMisspelling(String typed, Dimension expected) {
+		QuantityFormatException misspelt = Misspelling.of(typed, expected);
+		if (misspelt != null) {
+			throw misspelt;
+		}
+	}
+
 	private static Units.Unit unit(String text, String name, Dimension expected) {
 		Dimension needed = expected == Dimension.WIRE ? Dimension.LENGTH : expected;
 		Units.Unit unit = Units.find(name);
 		if (unit == null) {
+			refuseMisspelling(text, expected);
 			String similar = Units.similar(name, needed);
 			throw new QuantityFormatException(text, "unknown unit '" + name + "'", similar.isEmpty()
 					? "expected " + expected.noun() + ", e.g. " + expected.example() : "did you mean " + similar + "?");
