@@ -26,6 +26,7 @@ import gapwright.ui.canvas.CanvasScale;
 import gapwright.ui.canvas.export.PictureExport;
 import gapwright.ui.editor.DesignEditor;
 import gapwright.ui.fields.ThemeColours;
+import gapwright.ui.session.DesignSession;
 
 /** Takes a picture of every example on the canvas, light and dark, in the window and exported: target/pictures. */
 class ExamplePicturesTest {
@@ -67,6 +68,22 @@ class ExamplePicturesTest {
 		canvas.picture().labels().values().forEach(label -> label.lines()
 				.forEach(line -> assertTrue(svg.contains('>' + line.text() + '<'), line.text() + " is not in the picture")));
 		save("boost-choke.svg", svg.getBytes(java.nio.charset.StandardCharsets.UTF_8));
+	}
+
+	/** What the README shows of a leg over saturation. */
+	@Test
+	void theStalledPumpIsDrawnOverSaturation() throws Exception {
+		theme(LIGHT);
+		DesignEditor editor = Workbench.open(Workbench.example("three-phase-reactor.gapwright"));
+		DesignSession session = editor.getAdapter(DesignSession.class);
+		session.choose(session.design().getOperatingPoints().stream().filter(point -> point.getId().equals("stalled-pump"))
+				.findFirst().orElseThrow());
+		Workbench.settle();
+		CanvasModel canvas = editor.getAdapter(CanvasPage.class).canvas();
+		byte[] png = PictureExport.png(canvas.pictureAt(CanvasScale.zoom(0.25)), Display.getCurrent(), 1);
+		assertTrue(share(new ImageData(new ByteArrayInputStream(png)), ThemeColours.OVER.get().getRGB()) > 0.001,
+				"the middle leg is outlined in the colour of over");
+		save("three-phase-reactor-stalled-light.png", png);
 	}
 
 	private static void pictures(String theme) throws Exception {
