@@ -76,7 +76,9 @@ final class CheckCommand {
 			design = DesignReader.read(Path.of(file));
 		} catch (UnreadableDesignException e) {
 			for (ReadProblem problem : e.problems()) {
-				err.println(new ReadProblem(file, problem.line(), problem.element(), problem.attribute(),
+				// file:element: message, also where the element is the whole file
+				String shown = problem.element().isEmpty() ? file + ":" : file;
+				err.println(new ReadProblem(shown, problem.line(), problem.element(), problem.attribute(),
 						problem.found(), problem.expected()).text());
 			}
 			return ExitStatus.DATA;

@@ -126,6 +126,14 @@ class MainTest {
 	}
 
 	@Test
+	void aCutOffFileIsRefusedInTheSameFormOfMessage() throws IOException {
+		String file = changed(NEAR, "</gapwright:Design>", "");
+		assertEquals(65, run("check", file));
+		assertTrue(err.startsWith(file + ":: truncated or malformed XML: "), err);
+		assertEquals("", out);
+	}
+
+	@Test
 	void aNumberWithoutUnitIsRefusedByFileElementAttributeFoundAndExpected() throws IOException {
 		String file = changed(NEAR, "length=\"1.1 mm\"", "length=\"1.1\"");
 		assertEquals(65, run("check", file));
