@@ -19,12 +19,19 @@ import gapwright.ui.fields.ThemeColours;
 final class Thumbnail extends Canvas {
 
 	private static final int MARGIN = 8;
+	private static final int SOON = 150;
 
 	private final CanvasModel canvas;
 	private final FigureCanvas shown;
 	private final Runnable redraw = () -> {
 		if (!isDisposed()) {
 			redraw();
+		}
+	};
+	/** A drag changes the drawing many times a second; in small that is seen soon enough a little later. */
+	private final Runnable redrawSoon = () -> {
+		if (!isDisposed()) {
+			getDisplay().timerExec(SOON, redraw);
 		}
 	};
 	private CanvasScale small = CanvasScale.zoom(1);
@@ -35,11 +42,11 @@ final class Thumbnail extends Canvas {
 		super(parent, SWT.DOUBLE_BUFFERED | SWT.NO_BACKGROUND);
 		this.canvas = canvas;
 		this.shown = shown;
-		canvas.addListener(redraw);
+		canvas.addListener(redrawSoon);
 		shown.getViewport().addPropertyChangeListener(Viewport.PROPERTY_VIEW_LOCATION, event -> redraw.run());
 		addListener(SWT.Paint, event -> paint(event.gc));
 		addListener(SWT.Resize, event -> redraw());
-		addListener(SWT.Dispose, event -> canvas.removeListener(redraw));
+		addListener(SWT.Dispose, event -> canvas.removeListener(redrawSoon));
 		addListener(SWT.MouseDown, event -> scroll(event.x, event.y));
 		addListener(SWT.MouseMove, event -> {
 			if ((event.stateMask & SWT.BUTTON1) != 0) {

@@ -45,6 +45,7 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 	private FileWatch watch;
 	private EditorSelection selection;
 	private OperatingPointBar bar;
+	private boolean dirty;
 
 	@Override
 	public void init(IEditorSite site, IEditorInput input) throws PartInitException {
@@ -88,7 +89,7 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 
 	private void open(Design design) {
 		session = new DesignSession(design, getContainer().getDisplay()::asyncExec);
-		session.history().addListener(() -> firePropertyChange(PROP_DIRTY));
+		session.history().addListener(this::tellDirty);
 		bar.show(session);
 		canvas = new CanvasPage(session);
 		try {
@@ -99,6 +100,14 @@ public final class DesignEditor extends MultiPageEditorPart implements ITabbedPr
 		forms = new FormPages(getContainer(), session);
 		forms.addTo((control, title) -> setPageText(addPage(control), title));
 		forms.onChoose(selection::changed);
+	}
+
+	/** The workbench looks at all its parts when told, so it is told of a change alone. */
+	private void tellDirty() {
+		if (dirty != isDirty()) {
+			dirty = isDirty();
+			firePropertyChange(PROP_DIRTY);
+		}
 	}
 
 	private EObject chosenOnForm() {

@@ -47,6 +47,7 @@ final class LabelMaker {
 	private final Design design;
 	private final OperatingPoint point;
 	private final OperatingPointResult result;
+	private final Map<String, LegResult> results;
 	private final CanvasScale scale;
 	private final Pen measure;
 	private final Scene scene;
@@ -56,11 +57,13 @@ final class LabelMaker {
 	private final Map<Leg, List<String>> crowded = new HashMap<>();
 	private final LabelLayout layout = new LabelLayout();
 
-	LabelMaker(Design design, OperatingPoint point, OperatingPointResult result, CanvasScale scale, Pen measure,
+	LabelMaker(Design design, OperatingPoint point, OperatingPointResult result, Map<String, LegResult> results,
+			CanvasScale scale, Pen measure,
 			Scene scene, Picture picture, Map<Leg, Double> build) {
 		this.design = design;
 		this.point = point;
 		this.result = result;
+		this.results = results;
 		this.scale = scale;
 		this.measure = measure;
 		this.scene = scene;
@@ -96,7 +99,7 @@ final class LabelMaker {
 	}
 
 	private double urgency(Leg leg) {
-		LegResult found = result == null ? null : result.leg(leg.getId());
+		LegResult found = results.get(leg.getId());
 		return found == null || Double.isNaN(found.utilisation()) ? 0 : found.utilisation();
 	}
 
@@ -159,7 +162,7 @@ final class LabelMaker {
 	}
 
 	private void leg(Bar bar, double[] middle) {
-		LegResult found = result == null ? null : result.leg(bar.leg().getId());
+		LegResult found = results.get(bar.leg().getId());
 		List<LabelLayout.Place> places = new ArrayList<>();
 		double[] centre = bar.at(bar.length() / 2, 0);
 		int outward = (middle[0] - centre[0]) * -bar.uy() + (middle[1] - centre[1]) * bar.ux() > 1e-6 ? -1 : 1;

@@ -44,6 +44,7 @@ public final class PictureMaker {
 	private final Scene scene;
 	private final Picture picture = new Picture();
 	private final Map<Leg, Double> build = new HashMap<>();
+	private final Map<String, LegResult> results = new HashMap<>();
 
 	/**
 	 * @param point   the chosen operating point, or null
@@ -57,12 +58,15 @@ public final class PictureMaker {
 		this.scale = scale;
 		this.measure = measure;
 		scene = new Scene(design);
+		if (result != null) {
+			result.legs().forEach(leg -> results.put(leg.id(), leg));
+		}
 	}
 
 	/** @return drawing and labels */
 	public Picture make() {
 		makeDrawing();
-		new LabelMaker(design, point, result, scale, measure, scene, picture, build).make();
+		new LabelMaker(design, point, result, results, scale, measure, scene, picture, build).make();
 		return picture;
 	}
 
@@ -131,7 +135,7 @@ public final class PictureMaker {
 	}
 
 	private LegLook leg(Bar bar) {
-		LegResult leg = result == null ? null : result.leg(bar.leg().getId());
+		LegResult leg = results.get(bar.leg().getId());
 		double[] outline = scale.pixels(bar.outline(1));
 		double[] start = bar.at(bar.start(), 0);
 		double[] end = bar.at(bar.end(), 0);

@@ -1,5 +1,8 @@
 package gapwright.ui.canvas.paint;
 
+import java.util.HashMap;
+import java.util.Map;
+
 import org.eclipse.draw2d.FigureUtilities;
 import org.eclipse.jface.resource.FontRegistry;
 import org.eclipse.jface.resource.JFaceResources;
@@ -10,6 +13,15 @@ import org.eclipse.swt.graphics.FontData;
 public final class CanvasFonts {
 
 	private static final double POINTS_PER_PIXEL = 0.75;
+
+	/** A text in a size. */
+	private record Written(String text, double pixels, boolean bold) {
+	}
+
+	/** Widths of the texts shown of late: measuring is slow, and a drag writes most of them again. */
+	private static final Map<Written, Double> WIDTHS = new HashMap<>();
+	private static final int MOST_WIDTHS = 5000;
+	private static Font measuredWith;
 
 	private CanvasFonts() {
 	}
@@ -27,7 +39,12 @@ public final class CanvasFonts {
 
 	/** @return width in pixels of a text in a size of pixels */
 	public static double width(String text, double pixels, boolean bold) {
-		return width(text, get(pixels, bold));
+		Font base = JFaceResources.getDefaultFont();
+		if (base != measuredWith || WIDTHS.size() > MOST_WIDTHS) {
+			measuredWith = base;
+			WIDTHS.clear();
+		}
+		return WIDTHS.computeIfAbsent(new Written(text, pixels, bold), key -> width(text, get(pixels, bold)));
 	}
 
 	static double width(String text, Font font) {
