@@ -40,11 +40,11 @@ public abstract class MasterDetailPage extends Composite {
 		this.session = session;
 		setLayout(new FillLayout());
 		SashForm sash = new SashForm(this, SWT.HORIZONTAL);
-		// both sides alike, because the dark theme gives what scrolls another background
-		ScrolledComposite left = scrolled(sash, SWT.NONE);
+		// both sides scroll, because what does not has another background in either theme
+		ScrolledComposite left = scrolled(sash);
 		list = new MasterList(left, title, this::label, this::chosen);
 		left.setContent(list.control());
-		scrolled = scrolled(sash, SWT.V_SCROLL | SWT.H_SCROLL);
+		scrolled = scrolled(sash);
 		Composite stack = new Composite(scrolled, SWT.NONE);
 		stack.setLayout(new StackLayout());
 		details = new Composite(stack, SWT.NONE);
@@ -62,8 +62,8 @@ public abstract class MasterDetailPage extends Composite {
 		addListener(SWT.Dispose, event -> session.history().removeListener(refresher));
 	}
 
-	private static ScrolledComposite scrolled(Composite parent, int style) {
-		ScrolledComposite scrolled = new ScrolledComposite(parent, style);
+	private static ScrolledComposite scrolled(Composite parent) {
+		ScrolledComposite scrolled = new ScrolledComposite(parent, SWT.V_SCROLL | SWT.H_SCROLL);
 		scrolled.setExpandHorizontal(true);
 		scrolled.setExpandVertical(true);
 		return scrolled;
