@@ -23,13 +23,14 @@ public final class ZoomControl {
 
 	private final FigureCanvas control;
 	private final CanvasModel canvas;
-	/** Until the user zooms, the drawing is fitted again whenever the control changes its size. */
+	/** Until the user zooms or edits, the drawing is fitted again whenever the control changes its size. */
 	private boolean fitting = true;
 
 	ZoomControl(FigureCanvas control, CanvasModel canvas) {
 		this.control = control;
 		this.canvas = canvas;
 		control.addListener(SWT.MouseVerticalWheel, this::wheel);
+		canvas.session().history().addListener(() -> fitting = false);
 	}
 
 	private void wheel(Event event) {
