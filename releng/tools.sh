@@ -71,12 +71,11 @@ virtual_display() {
 	display_jobs="$display_jobs $!"
 }
 
-# changed_since STAMP PATH…: whether a file came, went or changed since the stamp was written by stamp
-changed_since() {
-	stamp_file=$1; shift
-	[ "$(state_of "$@")" != "$(cat "$stamp_file" 2>/dev/null)" ]
+product=$root/releng/gapwright.product/target/products/gapwright/linux/gtk/x86_64
+
+# What the product is made of, as a number that changes when a file comes, goes or changes.
+product_inputs() {
+	(cd "$root" && find pom.xml .mvn bundles features releng/gapwright.target releng/gapwright.product \( -name target -o -name bin \) -prune \
+		-o -type f ! -name '.polyglot*' ! -name '.tycho*' -printf '%p %s %T@\n' | sort | cksum)
 }
-state_of() {
-	(cd "$root" && find "$@" \( -name target -o -name bin \) -prune -o -type f ! -name '.polyglot*' ! -name '.tycho*' \
-		-printf '%p %s %T@\n' | sort | cksum)
-}
+product_is_current() { [ -d "$product" ] && [ "$(product_inputs)" = "$(cat "$cache/product.state" 2>/dev/null)" ]; }
