@@ -88,15 +88,21 @@ final class ImposedLinkages {
 		return sum;
 	}
 
-	/** Largest |λ − imposed| over the winding's Σ |turns·flux|, a ratio. */
-	double defect(State state) {
-		double worst = 0;
+	/**
+	 * @param ratio    of the winding's Σ |turns·flux|, or of its linkage where that is more
+	 * @param rounding Wb that any flux may be off by rounding alone
+	 * @return whether every imposed linkage is met to within the one or the other
+	 */
+	boolean isMet(State state, double ratio, double rounding) {
 		for (int v = 0; v < winding.length; v++) {
-			double off = Math.abs(state.linkage(winding[v]) - linkage[v]);
-			double scale = Math.max(state.linkageScale(winding[v]), Math.abs(linkage[v]));
-			worst = Math.max(worst, off == 0 ? 0 : off / scale);
+			int w = winding[v];
+			double off = Math.abs(state.linkage(w) - linkage[v]);
+			double scale = Math.max(state.linkageScale(w), Math.abs(linkage[v]));
+			if (!(off <= Math.max(ratio * scale, rounding * state.turns(w)))) {
+				return false;
+			}
 		}
-		return worst;
+		return true;
 	}
 
 	boolean isEmpty() {

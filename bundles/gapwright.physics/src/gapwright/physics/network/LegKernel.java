@@ -50,14 +50,12 @@ final class LegKernel {
 				low = h;
 			}
 			double next = h - defect / (length + reactive * curve.slope(h));
-			if (!(next >= low && next <= high)) {
-				next = low + 0.5 * (high - low);
-			}
-			double moved = Math.abs(next - h);
-			h = next;
-			if (moved <= 2 * Math.ulp(h)) {
+			if (Math.abs(next - h) <= 2 * Math.ulp(h)) {
+				h = next;
 				break;
 			}
+			// an end of the bracket was tried before: on an S-shaped table Newton can go to and fro between both
+			h = next > low && next < high ? next : low + 0.5 * (high - low);
 		}
 		return Math.copySign(h, f);
 	}

@@ -20,7 +20,10 @@ public final class NetworkSolver {
 	private static final int DENSE_UP_TO = 40;
 	/** A damped step always succeeds; this only bounds what a defect could cost. */
 	private static final int MOST_ITERATIONS = 100;
-	private static final int MOST_HALVINGS = 60;
+	/** Interpolation with every third step a halving: enough to part any two doubles. */
+	private static final int MOST_TRIALS = 180;
+	/** Share of the slope that may be left where a search ends. */
+	private static final double GENTLE = 0.5;
 	/** Joint imbalance over the largest flux that counts as balanced. */
 	private static final double FLUX_BOUND = 1e-12;
 	/** Below this Wb a flux is no flux. */
@@ -28,7 +31,7 @@ public final class NetworkSolver {
 	private static final double MMF_BOUND = 1e-10;
 	/** Once balanced, one more step usually gains everything down to here; it is taken when it costs no search. */
 	private static final double POLISHED = 1e-15;
-	/** Units of rounding of the potentials that an imbalance cannot be told from. */
+	/** Units of rounding of potentials, sources and fields that an imbalance cannot be told from. */
 	private static final double ROUNDING = 16 * 0x1p-53;
 	private static final double SUFFICIENT_DECREASE = 1e-4;
 	/** Near the minimum the change of the co-energy is lost in rounding below this fraction of it. */
@@ -150,26 +153,19 @@ public final class NetworkSolver {
 	}
 
 	private boolean isBalanced(ImposedLinkages imposed) {
-		double bound = Math.max(NO_FLUX, Math.max(FLUX_BOUND * state.largestFlux(), roundingOfFlux()));
-		return state.largestImbalance() <= bound && state.mmfDefect() <= MMF_BOUND
-				&& imposed.defect(state) <= FLUX_BOUND;
+		if (!(state.mmfDefect() <= MMF_BOUND)) {
+			return false;
+		}
+		double bound = Math.max(NO_FLUX, FLUX_BOUND * state.largestFlux());
+		if (state.largestImbalance() <= bound && imposed.isMet(state, FLUX_BOUND, 0)) {
+			return true;
+		}
+		double rounding = ROUNDING * state.fluxMagnified(conductance);
+		return state.largestImbalance() <= Math.max(bound, rounding) && imposed.isMet(state, FLUX_BOUND, rounding);
 	}
 
 	private boolean isPolished(ImposedLinkages imposed) {
-		return state.largestImbalance() <= POLISHED * state.largestFlux() && imposed.defect(state) <= POLISHED;
-	}
-
-	/** What rounding of the potentials alone does to a flux: a short leg of high permeability magnifies it. */
-	private double roundingOfFlux() {
-		int[] unknown = topology.unknown();
-		double largest = 0;
-		for (int k = 0; k < conductance.length; k++) {
-			int a = unknown[network.from(k)];
-			int b = unknown[network.to(k)];
-			double scale = Math.max(a < 0 ? 0 : Math.abs(state.potential[a]), b < 0 ? 0 : Math.abs(state.potential[b]));
-			largest = Math.max(largest, conductance[k] * scale);
-		}
-		return ROUNDING * largest;
+		return state.largestImbalance() <= POLISHED * state.largestFlux() && imposed.isMet(state, POLISHED, 0);
 	}
 
 	private void step(ImposedLinkages imposed) {
@@ -183,36 +179,65 @@ public final class NetworkSolver {
 		}
 	}
 
-	/** Halves the step until the slope has changed sign, the co-energy has fallen enough, or rounding hides its fall. */
+	/**
+	 * Takes the full step when the slope along it has not changed sign. Otherwise the minimum along the step is
+	 * bracketed, and approached until half of the slope is gone and the co-energy has fallen enough, or rounding hides
+	 * its fall. Stopping at the first fall instead can cross a sharp knee at every step, to and fro, without end.
+	 */
 	private boolean search(ImposedLinkages imposed) {
 		double slope = slope(state, imposed);
-		double start = Double.NaN;
+		if (tryStep(1, imposed) <= 0) {
+			return accept();
+		}
+		double start = state.coEnergy() - imposed.work(state);
+		boolean lostInRounding = Math.abs(slope) < LOST_IN_ROUNDING * Math.abs(start);
+		double before = 0;
+		double slopeBefore = slope;
+		double beyond = 1;
+		double slopeBeyond = slope(trial, imposed);
 		double t = 1;
-		for (int halving = 0; halving < MOST_HALVINGS; halving++, t *= 0.5) {
-			trial.copyFrom(state);
-			for (int i = 0; i < potentialStep.length; i++) {
-				trial.potential[i] += t * potentialStep[i];
-			}
-			if (!imposed.isEmpty()) {
-				for (int w = 0; w < currentStep.length; w++) {
-					trial.current[w] += t * currentStep[w];
-				}
-			}
-			trial.evaluate();
-			double there = slope(trial, imposed);
-			if (there <= 0) {
+		double there = slopeBeyond;
+		for (int i = 0; i < MOST_TRIALS; i++) {
+			if (there <= 0 && there >= GENTLE * slope || there > 0 && (lostInRounding && there <= 0.9 * -slope
+					|| there <= GENTLE * -slope
+							&& trial.coEnergy() - imposed.work(trial) <= start + SUFFICIENT_DECREASE * t * slope)) {
 				return accept();
 			}
-			if (Double.isNaN(start)) {
-				start = state.coEnergy() - imposed.work(state);
+			if (there > 0) {
+				beyond = t;
+				slopeBeyond = there;
+			} else {
+				before = t;
+				slopeBefore = there;
 			}
-			double end = trial.coEnergy() - imposed.work(trial);
-			if (end <= start + SUFFICIENT_DECREASE * t * slope
-					|| Math.abs(slope) < LOST_IN_ROUNDING * Math.abs(start) && there <= 0.9 * Math.abs(slope)) {
-				return accept();
+			double share = i % 3 == 2 ? 0.5 : slopeBefore / (slopeBefore - slopeBeyond);
+			t = before + share * (beyond - before);
+			if (!(t > before && t < beyond)) {
+				break;
+			}
+			there = tryStep(t, imposed);
+		}
+		if (before == 0) {
+			return false;
+		}
+		// up to there the co-energy falls, by convexity
+		tryStep(before, imposed);
+		return accept();
+	}
+
+	/** @return slope of the minimised function at that fraction of the step */
+	private double tryStep(double t, ImposedLinkages imposed) {
+		trial.copyFrom(state);
+		for (int i = 0; i < potentialStep.length; i++) {
+			trial.potential[i] += t * potentialStep[i];
+		}
+		if (!imposed.isEmpty()) {
+			for (int w = 0; w < currentStep.length; w++) {
+				trial.current[w] += t * currentStep[w];
 			}
 		}
-		return false;
+		trial.evaluate();
+		return slope(trial, imposed);
 	}
 
 	private boolean accept() {

@@ -139,6 +139,39 @@ final class State {
 		return sum;
 	}
 
+	/** Σ |turns| of a winding. */
+	double turns(int winding) {
+		double sum = 0;
+		for (int c = 0; c < network.coilCount(); c++) {
+			sum += network.coilWinding(c) == winding ? Math.abs(network.coilTurns(c)) : 0;
+		}
+		return sum;
+	}
+
+	/**
+	 * What of a flux would change if a potential, a source or a field changed by as much as itself, Wb: a short leg of
+	 * high permeability, or a steep knee far out, magnifies their rounding.
+	 */
+	double fluxMagnified(double[] conductance) {
+		double largest = 0;
+		for (int k = 0; k < flux.length; k++) {
+			if (bridge[k]) {
+				continue;
+			}
+			int a = unknown[network.from(k)];
+			int b = unknown[network.to(k)];
+			double first = a < 0 ? 0 : potential[a];
+			double second = b < 0 ? 0 : potential[b];
+			double scale = Math.max(Math.max(Math.abs(first), Math.abs(second)), Math.abs(mmf[k] - (first - second)));
+			largest = Math.max(largest, conductance[k] * scale);
+			if (k < legs) {
+				largest = Math.max(largest,
+						network.ironArea(k) * network.curve(k).slope(field[k]) * Math.abs(field[k]));
+			}
+		}
+		return largest;
+	}
+
 	double largestFlux() {
 		double largest = 0;
 		for (double phi : flux) {
