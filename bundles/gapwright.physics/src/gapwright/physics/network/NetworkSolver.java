@@ -22,8 +22,8 @@ public final class NetworkSolver {
 	private static final int MOST_ITERATIONS = 100;
 	/** Interpolation with every third step a halving: enough to part any two doubles. */
 	private static final int MOST_TRIALS = 180;
-	/** Share of the slope that may be left where a search ends. */
-	private static final double GENTLE = 0.5;
+	/** Share of the slope that may be left where a search ends; a half still left hard knees crossed to and fro. */
+	private static final double GENTLE = 0.1;
 	/** Joint imbalance over the largest flux that counts as balanced. */
 	private static final double FLUX_BOUND = 1e-12;
 	/** Below this Wb a flux is no flux. */
@@ -181,7 +181,7 @@ public final class NetworkSolver {
 
 	/**
 	 * Takes the full step when the slope along it has not changed sign. Otherwise the minimum along the step is
-	 * bracketed, and approached until half of the slope is gone and the co-energy has fallen enough, or rounding hides
+	 * bracketed, and approached until nine tenths of the slope are gone and the co-energy has fallen enough, or rounding hides
 	 * its fall. Stopping at the first fall instead can cross a sharp knee at every step, to and fro, without end.
 	 */
 	private boolean search(ImposedLinkages imposed) {
