@@ -75,7 +75,7 @@ class DesignSessionTest {
 
 	@Test
 	void anAnswerToAnOlderEditIsNeverShownAndNoEditIsLost() throws InterruptedException {
-		DesignSession session = new DesignSession(ladder(300), waiting::add);
+		DesignSession session = new DesignSession(ladder(900), waiting::add);
 		assertNull(session.result(), "nothing is shown before it is computed");
 		Runnable old = waiting.take();
 		wind(session, 40);
@@ -99,7 +99,7 @@ class DesignSessionTest {
 
 	@Test
 	void manyEditsInARowEndWithTheFiguresOfTheLast() throws InterruptedException {
-		DesignSession session = new DesignSession(ladder(300), waiting::add);
+		DesignSession session = new DesignSession(ladder(900), waiting::add);
 		for (int turns = 21; turns <= 60; turns++) {
 			wind(session, turns);
 			assertNull(session.result());
