@@ -22,6 +22,7 @@ import gapwright.model.quantity.Quantity;
  *   <li>{@link gapwright.model.AirPath#getPermeance <em>Permeance</em>}</li>
  *   <li>{@link gapwright.model.AirPath#getArea <em>Area</em>}</li>
  *   <li>{@link gapwright.model.AirPath#getLength <em>Length</em>}</li>
+ *   <li>{@link gapwright.model.AirPath#isLeakage <em>Leakage</em>}</li>
  * </ul>
  *
  * @see gapwright.model.GapwrightPackage#getAirPath()
@@ -138,5 +139,30 @@ public interface AirPath extends Element {
 	 * @generated
 	 */
 	void setLength(Quantity value);
+
+	/**
+	 * Returns the value of the '<em><b>Leakage</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * An estimate of the leakage across a window, made from the drawing.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Leakage</em>' attribute.
+	 * @see #setLeakage(boolean)
+	 * @see gapwright.model.GapwrightPackage#getAirPath_Leakage()
+	 * @model
+	 * @generated
+	 */
+	boolean isLeakage();
+
+	/**
+	 * Sets the value of the '{@link gapwright.model.AirPath#isLeakage <em>Leakage</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @param value the new value of the '<em>Leakage</em>' attribute.
+	 * @see #isLeakage()
+	 * @generated
+	 */
+	void setLeakage(boolean value);
 
 } // AirPath

@@ -28,6 +28,9 @@ import org.eclipse.emf.ecore.EObject;
  *   <li>{@link gapwright.model.Design#getWindings <em>Windings</em>}</li>
  *   <li>{@link gapwright.model.Design#getOperatingPoints <em>Operating Points</em>}</li>
  *   <li>{@link gapwright.model.Design#getLimits <em>Limits</em>}</li>
+ *   <li>{@link gapwright.model.Design#getLeakages <em>Leakages</em>}</li>
+ *   <li>{@link gapwright.model.Design#getConnections <em>Connections</em>}</li>
+ *   <li>{@link gapwright.model.Design#getTolerances <em>Tolerances</em>}</li>
  * </ul>
  *
  * @see gapwright.model.GapwrightPackage#getDesign()
@@ -199,5 +202,50 @@ public interface Design extends EObject {
 	 * @generated
 	 */
 	void setLimits(Limits value);
+
+	/**
+	 * Returns the value of the '<em><b>Leakages</b></em>' containment reference list.
+	 * The list contents are of type {@link gapwright.model.WindingLeakage}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Pairs of windings whose leakage inductance is reckoned from their builds.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Leakages</em>' containment reference list.
+	 * @see gapwright.model.GapwrightPackage#getDesign_Leakages()
+	 * @model containment="true"
+	 * @generated
+	 */
+	EList<WindingLeakage> getLeakages();
+
+	/**
+	 * Returns the value of the '<em><b>Connections</b></em>' containment reference list.
+	 * The list contents are of type {@link gapwright.model.WindingConnection}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Series and parallel connections of windings whose inductance is reported.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Connections</em>' containment reference list.
+	 * @see gapwright.model.GapwrightPackage#getDesign_Connections()
+	 * @model containment="true"
+	 * @generated
+	 */
+	EList<WindingConnection> getConnections();
+
+	/**
+	 * Returns the value of the '<em><b>Tolerances</b></em>' containment reference list.
+	 * The list contents are of type {@link gapwright.model.Tolerance}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * How far single values may be from what is drawn.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Tolerances</em>' containment reference list.
+	 * @see gapwright.model.GapwrightPackage#getDesign_Tolerances()
+	 * @model containment="true"
+	 * @generated
+	 */
+	EList<Tolerance> getTolerances();
 
 } // Design

@@ -22,6 +22,7 @@ import gapwright.model.quantity.Quantity;
  *   <li>{@link gapwright.model.Gap#getFringing <em>Fringing</em>}</li>
  *   <li>{@link gapwright.model.Gap#getWindowHeight <em>Window Height</em>}</li>
  *   <li>{@link gapwright.model.Gap#getPosition <em>Position</em>}</li>
+ *   <li>{@link gapwright.model.Gap#getPlace <em>Place</em>}</li>
  * </ul>
  *
  * @see gapwright.model.GapwrightPackage#getGap()
@@ -158,5 +159,33 @@ public interface Gap extends Element {
 	 * @generated
 	 */
 	void setPosition(double value);
+
+	/**
+	 * Returns the value of the '<em><b>Place</b></em>' attribute.
+	 * The literals are from the enumeration {@link gapwright.model.GapPlace}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * What the pole faces of the gap stand opposite; decides how far the field spreads.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Place</em>' attribute.
+	 * @see gapwright.model.GapPlace
+	 * @see #setPlace(GapPlace)
+	 * @see gapwright.model.GapwrightPackage#getGap_Place()
+	 * @model
+	 * @generated
+	 */
+	GapPlace getPlace();
+
+	/**
+	 * Sets the value of the '{@link gapwright.model.Gap#getPlace <em>Place</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @param value the new value of the '<em>Place</em>' attribute.
+	 * @see gapwright.model.GapPlace
+	 * @see #getPlace()
+	 * @generated
+	 */
+	void setPlace(GapPlace value);
 
 } // Gap

@@ -166,6 +166,24 @@ public interface GapwrightFactory extends EFactory {
 	Saturation createSaturation();
 
 	/**
+	 * Returns a new object of class '<em>Curve At Temperature</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Curve At Temperature</em>'.
+	 * @generated
+	 */
+	CurveAtTemperature createCurveAtTemperature();
+
+	/**
+	 * Returns a new object of class '<em>Initial Permeability</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Initial Permeability</em>'.
+	 * @generated
+	 */
+	InitialPermeability createInitialPermeability();
+
+	/**
 	 * Returns a new object of class '<em>Steinmetz Loss</em>'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -209,6 +227,42 @@ public interface GapwrightFactory extends EFactory {
 	 * @generated
 	 */
 	Limits createLimits();
+
+	/**
+	 * Returns a new object of class '<em>Winding Leakage</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Winding Leakage</em>'.
+	 * @generated
+	 */
+	WindingLeakage createWindingLeakage();
+
+	/**
+	 * Returns a new object of class '<em>Winding Connection</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Winding Connection</em>'.
+	 * @generated
+	 */
+	WindingConnection createWindingConnection();
+
+	/**
+	 * Returns a new object of class '<em>Connected Winding</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Connected Winding</em>'.
+	 * @generated
+	 */
+	ConnectedWinding createConnectedWinding();
+
+	/**
+	 * Returns a new object of class '<em>Tolerance</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Tolerance</em>'.
+	 * @generated
+	 */
+	Tolerance createTolerance();
 
 	/**
 	 * Returns the package supported by this factory.

@@ -149,13 +149,40 @@ public interface GapwrightPackage extends EPackage {
 	int DESIGN__LIMITS = 8;
 
 	/**
+	 * The feature id for the '<em><b>Leakages</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int DESIGN__LEAKAGES = 9;
+
+	/**
+	 * The feature id for the '<em><b>Connections</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int DESIGN__CONNECTIONS = 10;
+
+	/**
+	 * The feature id for the '<em><b>Tolerances</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int DESIGN__TOLERANCES = 11;
+
+	/**
 	 * The number of structural features of the '<em>Design</em>' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
 	 * @ordered
 	 */
-	int DESIGN_FEATURE_COUNT = 9;
+	int DESIGN_FEATURE_COUNT = 12;
 
 	/**
 	 * The meta object id for the '{@link gapwright.model.impl.ElementImpl <em>Element</em>}' class.
@@ -468,13 +495,22 @@ public interface GapwrightPackage extends EPackage {
 	int GAP__POSITION = ELEMENT_FEATURE_COUNT + 4;
 
 	/**
+	 * The feature id for the '<em><b>Place</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int GAP__PLACE = ELEMENT_FEATURE_COUNT + 5;
+
+	/**
 	 * The number of structural features of the '<em>Gap</em>' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
 	 * @ordered
 	 */
-	int GAP_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 5;
+	int GAP_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 6;
 
 	/**
 	 * The meta object id for the '{@link gapwright.model.impl.MagnetImpl <em>Magnet</em>}' class.
@@ -632,13 +668,22 @@ public interface GapwrightPackage extends EPackage {
 	int AIR_PATH__LENGTH = ELEMENT_FEATURE_COUNT + 4;
 
 	/**
+	 * The feature id for the '<em><b>Leakage</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int AIR_PATH__LEAKAGE = ELEMENT_FEATURE_COUNT + 5;
+
+	/**
 	 * The number of structural features of the '<em>Air Path</em>' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
 	 * @ordered
 	 */
-	int AIR_PATH_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 5;
+	int AIR_PATH_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 6;
 
 	/**
 	 * The meta object id for the '{@link gapwright.model.impl.WindingImpl <em>Winding</em>}' class.
@@ -851,13 +896,58 @@ public interface GapwrightPackage extends EPackage {
 	int MATERIAL__SOURCE = ELEMENT_FEATURE_COUNT + 4;
 
 	/**
+	 * The feature id for the '<em><b>Curve Temperature</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MATERIAL__CURVE_TEMPERATURE = ELEMENT_FEATURE_COUNT + 5;
+
+	/**
+	 * The feature id for the '<em><b>Curve Scaling</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MATERIAL__CURVE_SCALING = ELEMENT_FEATURE_COUNT + 6;
+
+	/**
+	 * The feature id for the '<em><b>Other Curves</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MATERIAL__OTHER_CURVES = ELEMENT_FEATURE_COUNT + 7;
+
+	/**
+	 * The feature id for the '<em><b>Permeabilities</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MATERIAL__PERMEABILITIES = ELEMENT_FEATURE_COUNT + 8;
+
+	/**
+	 * The feature id for the '<em><b>Curie Temperature</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MATERIAL__CURIE_TEMPERATURE = ELEMENT_FEATURE_COUNT + 9;
+
+	/**
 	 * The number of structural features of the '<em>Material</em>' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
 	 * @ordered
 	 */
-	int MATERIAL_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 5;
+	int MATERIAL_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 10;
 
 	/**
 	 * The meta object id for the '{@link gapwright.model.impl.CurveImpl <em>Curve</em>}' class.
@@ -1129,6 +1219,80 @@ public interface GapwrightPackage extends EPackage {
 	int SATURATION_FEATURE_COUNT = 2;
 
 	/**
+	 * The meta object id for the '{@link gapwright.model.impl.CurveAtTemperatureImpl <em>Curve At Temperature</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.impl.CurveAtTemperatureImpl
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getCurveAtTemperature()
+	 * @generated
+	 */
+	int CURVE_AT_TEMPERATURE = 18;
+
+	/**
+	 * The feature id for the '<em><b>Temperature</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CURVE_AT_TEMPERATURE__TEMPERATURE = 0;
+
+	/**
+	 * The feature id for the '<em><b>Curve</b></em>' containment reference.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CURVE_AT_TEMPERATURE__CURVE = 1;
+
+	/**
+	 * The number of structural features of the '<em>Curve At Temperature</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CURVE_AT_TEMPERATURE_FEATURE_COUNT = 2;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.impl.InitialPermeabilityImpl <em>Initial Permeability</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.impl.InitialPermeabilityImpl
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getInitialPermeability()
+	 * @generated
+	 */
+	int INITIAL_PERMEABILITY = 19;
+
+	/**
+	 * The feature id for the '<em><b>Temperature</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int INITIAL_PERMEABILITY__TEMPERATURE = 0;
+
+	/**
+	 * The feature id for the '<em><b>Relative Permeability</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int INITIAL_PERMEABILITY__RELATIVE_PERMEABILITY = 1;
+
+	/**
+	 * The number of structural features of the '<em>Initial Permeability</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int INITIAL_PERMEABILITY_FEATURE_COUNT = 2;
+
+	/**
 	 * The meta object id for the '{@link gapwright.model.impl.SteinmetzLossImpl <em>Steinmetz Loss</em>}' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -1136,7 +1300,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getSteinmetzLoss()
 	 * @generated
 	 */
-	int STEINMETZ_LOSS = 18;
+	int STEINMETZ_LOSS = 20;
 
 	/**
 	 * The feature id for the '<em><b>Coefficient</b></em>' attribute.
@@ -1209,7 +1373,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getOperatingPoint()
 	 * @generated
 	 */
-	int OPERATING_POINT = 19;
+	int OPERATING_POINT = 21;
 
 	/**
 	 * The feature id for the '<em><b>Id</b></em>' attribute.
@@ -1273,7 +1437,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getDrive()
 	 * @generated
 	 */
-	int DRIVE = 20;
+	int DRIVE = 22;
 
 	/**
 	 * The feature id for the '<em><b>Id</b></em>' attribute.
@@ -1319,7 +1483,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getCurrentDrive()
 	 * @generated
 	 */
-	int CURRENT_DRIVE = 21;
+	int CURRENT_DRIVE = 23;
 
 	/**
 	 * The feature id for the '<em><b>Id</b></em>' attribute.
@@ -1383,7 +1547,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getVoltageDrive()
 	 * @generated
 	 */
-	int VOLTAGE_DRIVE = 22;
+	int VOLTAGE_DRIVE = 24;
 
 	/**
 	 * The feature id for the '<em><b>Id</b></em>' attribute.
@@ -1440,13 +1604,22 @@ public interface GapwrightPackage extends EPackage {
 	int VOLTAGE_DRIVE__BIAS = DRIVE_FEATURE_COUNT + 2;
 
 	/**
+	 * The feature id for the '<em><b>Waveform</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int VOLTAGE_DRIVE__WAVEFORM = DRIVE_FEATURE_COUNT + 3;
+
+	/**
 	 * The number of structural features of the '<em>Voltage Drive</em>' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
 	 * @ordered
 	 */
-	int VOLTAGE_DRIVE_FEATURE_COUNT = DRIVE_FEATURE_COUNT + 3;
+	int VOLTAGE_DRIVE_FEATURE_COUNT = DRIVE_FEATURE_COUNT + 4;
 
 	/**
 	 * The meta object id for the '{@link gapwright.model.impl.LimitsImpl <em>Limits</em>}' class.
@@ -1456,7 +1629,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getLimits()
 	 * @generated
 	 */
-	int LIMITS = 23;
+	int LIMITS = 25;
 
 	/**
 	 * The feature id for the '<em><b>Near Fraction</b></em>' attribute.
@@ -1477,6 +1650,289 @@ public interface GapwrightPackage extends EPackage {
 	int LIMITS_FEATURE_COUNT = 1;
 
 	/**
+	 * The meta object id for the '{@link gapwright.model.impl.WindingLeakageImpl <em>Winding Leakage</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.impl.WindingLeakageImpl
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getWindingLeakage()
+	 * @generated
+	 */
+	int WINDING_LEAKAGE = 26;
+
+	/**
+	 * The feature id for the '<em><b>Id</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__ID = ELEMENT__ID;
+
+	/**
+	 * The feature id for the '<em><b>Name</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__NAME = ELEMENT__NAME;
+
+	/**
+	 * The feature id for the '<em><b>First</b></em>' reference.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__FIRST = ELEMENT_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Second</b></em>' reference.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__SECOND = ELEMENT_FEATURE_COUNT + 1;
+
+	/**
+	 * The feature id for the '<em><b>Arrangement</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__ARRANGEMENT = ELEMENT_FEATURE_COUNT + 2;
+
+	/**
+	 * The feature id for the '<em><b>First Build</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__FIRST_BUILD = ELEMENT_FEATURE_COUNT + 3;
+
+	/**
+	 * The feature id for the '<em><b>Second Build</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__SECOND_BUILD = ELEMENT_FEATURE_COUNT + 4;
+
+	/**
+	 * The feature id for the '<em><b>Separation</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__SEPARATION = ELEMENT_FEATURE_COUNT + 5;
+
+	/**
+	 * The feature id for the '<em><b>Height</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__HEIGHT = ELEMENT_FEATURE_COUNT + 6;
+
+	/**
+	 * The feature id for the '<em><b>Mean Turn</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__MEAN_TURN = ELEMENT_FEATURE_COUNT + 7;
+
+	/**
+	 * The feature id for the '<em><b>Interfaces</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE__INTERFACES = ELEMENT_FEATURE_COUNT + 8;
+
+	/**
+	 * The number of structural features of the '<em>Winding Leakage</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_LEAKAGE_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 9;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.impl.WindingConnectionImpl <em>Winding Connection</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.impl.WindingConnectionImpl
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getWindingConnection()
+	 * @generated
+	 */
+	int WINDING_CONNECTION = 27;
+
+	/**
+	 * The feature id for the '<em><b>Id</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_CONNECTION__ID = ELEMENT__ID;
+
+	/**
+	 * The feature id for the '<em><b>Name</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_CONNECTION__NAME = ELEMENT__NAME;
+
+	/**
+	 * The feature id for the '<em><b>Kind</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_CONNECTION__KIND = ELEMENT_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Members</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_CONNECTION__MEMBERS = ELEMENT_FEATURE_COUNT + 1;
+
+	/**
+	 * The number of structural features of the '<em>Winding Connection</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int WINDING_CONNECTION_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 2;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.impl.ConnectedWindingImpl <em>Connected Winding</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.impl.ConnectedWindingImpl
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getConnectedWinding()
+	 * @generated
+	 */
+	int CONNECTED_WINDING = 28;
+
+	/**
+	 * The feature id for the '<em><b>Winding</b></em>' reference.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CONNECTED_WINDING__WINDING = 0;
+
+	/**
+	 * The feature id for the '<em><b>Reversed</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CONNECTED_WINDING__REVERSED = 1;
+
+	/**
+	 * The number of structural features of the '<em>Connected Winding</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CONNECTED_WINDING_FEATURE_COUNT = 2;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.impl.ToleranceImpl <em>Tolerance</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.impl.ToleranceImpl
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getTolerance()
+	 * @generated
+	 */
+	int TOLERANCE = 29;
+
+	/**
+	 * The feature id for the '<em><b>Id</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int TOLERANCE__ID = ELEMENT__ID;
+
+	/**
+	 * The feature id for the '<em><b>Name</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int TOLERANCE__NAME = ELEMENT__NAME;
+
+	/**
+	 * The feature id for the '<em><b>Targets</b></em>' reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int TOLERANCE__TARGETS = ELEMENT_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Feature</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int TOLERANCE__FEATURE = ELEMENT_FEATURE_COUNT + 1;
+
+	/**
+	 * The feature id for the '<em><b>Deviation</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int TOLERANCE__DEVIATION = ELEMENT_FEATURE_COUNT + 2;
+
+	/**
+	 * The feature id for the '<em><b>Distribution</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int TOLERANCE__DISTRIBUTION = ELEMENT_FEATURE_COUNT + 3;
+
+	/**
+	 * The number of structural features of the '<em>Tolerance</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int TOLERANCE_FEATURE_COUNT = ELEMENT_FEATURE_COUNT + 4;
+
+	/**
 	 * The meta object id for the '{@link gapwright.model.SectionShape <em>Section Shape</em>}' enum.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -1484,7 +1940,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getSectionShape()
 	 * @generated
 	 */
-	int SECTION_SHAPE = 24;
+	int SECTION_SHAPE = 30;
 
 	/**
 	 * The meta object id for the '{@link gapwright.model.Fringing <em>Fringing</em>}' enum.
@@ -1494,7 +1950,77 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getFringing()
 	 * @generated
 	 */
-	int FRINGING = 25;
+	int FRINGING = 31;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.GapPlace <em>Gap Place</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.GapPlace
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getGapPlace()
+	 * @generated
+	 */
+	int GAP_PLACE = 32;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.CurveScaling <em>Curve Scaling</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.CurveScaling
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getCurveScaling()
+	 * @generated
+	 */
+	int CURVE_SCALING = 33;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.VoltageWaveform <em>Voltage Waveform</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.VoltageWaveform
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getVoltageWaveform()
+	 * @generated
+	 */
+	int VOLTAGE_WAVEFORM = 34;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.WindingArrangement <em>Winding Arrangement</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.WindingArrangement
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getWindingArrangement()
+	 * @generated
+	 */
+	int WINDING_ARRANGEMENT = 35;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.ConnectionKind <em>Connection Kind</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.ConnectionKind
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getConnectionKind()
+	 * @generated
+	 */
+	int CONNECTION_KIND = 36;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.TolerancedFeature <em>Toleranced Feature</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.TolerancedFeature
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getTolerancedFeature()
+	 * @generated
+	 */
+	int TOLERANCED_FEATURE = 37;
+
+	/**
+	 * The meta object id for the '{@link gapwright.model.Distribution <em>Distribution</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.Distribution
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getDistribution()
+	 * @generated
+	 */
+	int DISTRIBUTION = 38;
 
 	/**
 	 * The meta object id for the '<em>Length</em>' data type.
@@ -1504,7 +2030,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getLength()
 	 * @generated
 	 */
-	int LENGTH = 26;
+	int LENGTH = 39;
 
 	/**
 	 * The meta object id for the '<em>Area</em>' data type.
@@ -1514,7 +2040,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getArea()
 	 * @generated
 	 */
-	int AREA = 27;
+	int AREA = 40;
 
 	/**
 	 * The meta object id for the '<em>Flux Density</em>' data type.
@@ -1524,7 +2050,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getFluxDensity()
 	 * @generated
 	 */
-	int FLUX_DENSITY = 28;
+	int FLUX_DENSITY = 41;
 
 	/**
 	 * The meta object id for the '<em>Field Strength</em>' data type.
@@ -1534,7 +2060,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getFieldStrength()
 	 * @generated
 	 */
-	int FIELD_STRENGTH = 29;
+	int FIELD_STRENGTH = 42;
 
 	/**
 	 * The meta object id for the '<em>Current</em>' data type.
@@ -1544,7 +2070,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getCurrent()
 	 * @generated
 	 */
-	int CURRENT = 30;
+	int CURRENT = 43;
 
 	/**
 	 * The meta object id for the '<em>Voltage</em>' data type.
@@ -1554,7 +2080,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getVoltage()
 	 * @generated
 	 */
-	int VOLTAGE = 31;
+	int VOLTAGE = 44;
 
 	/**
 	 * The meta object id for the '<em>Time</em>' data type.
@@ -1564,7 +2090,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getTime()
 	 * @generated
 	 */
-	int TIME = 32;
+	int TIME = 45;
 
 	/**
 	 * The meta object id for the '<em>Temperature</em>' data type.
@@ -1574,7 +2100,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getTemperature()
 	 * @generated
 	 */
-	int TEMPERATURE = 33;
+	int TEMPERATURE = 46;
 
 	/**
 	 * The meta object id for the '<em>Frequency</em>' data type.
@@ -1584,7 +2110,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getFrequency()
 	 * @generated
 	 */
-	int FREQUENCY = 34;
+	int FREQUENCY = 47;
 
 	/**
 	 * The meta object id for the '<em>Resistance</em>' data type.
@@ -1594,7 +2120,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getResistance()
 	 * @generated
 	 */
-	int RESISTANCE = 35;
+	int RESISTANCE = 48;
 
 	/**
 	 * The meta object id for the '<em>Permeance</em>' data type.
@@ -1604,7 +2130,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getPermeance()
 	 * @generated
 	 */
-	int PERMEANCE = 36;
+	int PERMEANCE = 49;
 
 	/**
 	 * The meta object id for the '<em>Density</em>' data type.
@@ -1614,7 +2140,7 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getDensity()
 	 * @generated
 	 */
-	int DENSITY = 37;
+	int DENSITY = 50;
 
 	/**
 	 * The meta object id for the '<em>Wire</em>' data type.
@@ -1624,7 +2150,17 @@ public interface GapwrightPackage extends EPackage {
 	 * @see gapwright.model.impl.GapwrightPackageImpl#getWire()
 	 * @generated
 	 */
-	int WIRE = 38;
+	int WIRE = 51;
+
+	/**
+	 * The meta object id for the '<em>Deviation</em>' data type.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see gapwright.model.quantity.Quantity
+	 * @see gapwright.model.impl.GapwrightPackageImpl#getDeviation()
+	 * @generated
+	 */
+	int DEVIATION = 52;
 
 
 	/**
@@ -1735,6 +2271,39 @@ public interface GapwrightPackage extends EPackage {
 	 * @generated
 	 */
 	EReference getDesign_Limits();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link gapwright.model.Design#getLeakages <em>Leakages</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Leakages</em>'.
+	 * @see gapwright.model.Design#getLeakages()
+	 * @see #getDesign()
+	 * @generated
+	 */
+	EReference getDesign_Leakages();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link gapwright.model.Design#getConnections <em>Connections</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Connections</em>'.
+	 * @see gapwright.model.Design#getConnections()
+	 * @see #getDesign()
+	 * @generated
+	 */
+	EReference getDesign_Connections();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link gapwright.model.Design#getTolerances <em>Tolerances</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Tolerances</em>'.
+	 * @see gapwright.model.Design#getTolerances()
+	 * @see #getDesign()
+	 * @generated
+	 */
+	EReference getDesign_Tolerances();
 
 	/**
 	 * Returns the meta object for class '{@link gapwright.model.Element <em>Element</em>}'.
@@ -2008,6 +2577,17 @@ public interface GapwrightPackage extends EPackage {
 	EAttribute getGap_Position();
 
 	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.Gap#getPlace <em>Place</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Place</em>'.
+	 * @see gapwright.model.Gap#getPlace()
+	 * @see #getGap()
+	 * @generated
+	 */
+	EAttribute getGap_Place();
+
+	/**
 	 * Returns the meta object for class '{@link gapwright.model.Magnet <em>Magnet</em>}'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -2136,6 +2716,17 @@ public interface GapwrightPackage extends EPackage {
 	 * @generated
 	 */
 	EAttribute getAirPath_Length();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.AirPath#isLeakage <em>Leakage</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Leakage</em>'.
+	 * @see gapwright.model.AirPath#isLeakage()
+	 * @see #getAirPath()
+	 * @generated
+	 */
+	EAttribute getAirPath_Leakage();
 
 	/**
 	 * Returns the meta object for class '{@link gapwright.model.Winding <em>Winding</em>}'.
@@ -2298,6 +2889,61 @@ public interface GapwrightPackage extends EPackage {
 	 * @generated
 	 */
 	EAttribute getMaterial_Source();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.Material#getCurveTemperature <em>Curve Temperature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Curve Temperature</em>'.
+	 * @see gapwright.model.Material#getCurveTemperature()
+	 * @see #getMaterial()
+	 * @generated
+	 */
+	EAttribute getMaterial_CurveTemperature();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.Material#getCurveScaling <em>Curve Scaling</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Curve Scaling</em>'.
+	 * @see gapwright.model.Material#getCurveScaling()
+	 * @see #getMaterial()
+	 * @generated
+	 */
+	EAttribute getMaterial_CurveScaling();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link gapwright.model.Material#getOtherCurves <em>Other Curves</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Other Curves</em>'.
+	 * @see gapwright.model.Material#getOtherCurves()
+	 * @see #getMaterial()
+	 * @generated
+	 */
+	EReference getMaterial_OtherCurves();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link gapwright.model.Material#getPermeabilities <em>Permeabilities</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Permeabilities</em>'.
+	 * @see gapwright.model.Material#getPermeabilities()
+	 * @see #getMaterial()
+	 * @generated
+	 */
+	EReference getMaterial_Permeabilities();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.Material#getCurieTemperature <em>Curie Temperature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Curie Temperature</em>'.
+	 * @see gapwright.model.Material#getCurieTemperature()
+	 * @see #getMaterial()
+	 * @generated
+	 */
+	EAttribute getMaterial_CurieTemperature();
 
 	/**
 	 * Returns the meta object for class '{@link gapwright.model.Curve <em>Curve</em>}'.
@@ -2523,6 +3169,70 @@ public interface GapwrightPackage extends EPackage {
 	EAttribute getSaturation_FluxDensity();
 
 	/**
+	 * Returns the meta object for class '{@link gapwright.model.CurveAtTemperature <em>Curve At Temperature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Curve At Temperature</em>'.
+	 * @see gapwright.model.CurveAtTemperature
+	 * @generated
+	 */
+	EClass getCurveAtTemperature();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.CurveAtTemperature#getTemperature <em>Temperature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Temperature</em>'.
+	 * @see gapwright.model.CurveAtTemperature#getTemperature()
+	 * @see #getCurveAtTemperature()
+	 * @generated
+	 */
+	EAttribute getCurveAtTemperature_Temperature();
+
+	/**
+	 * Returns the meta object for the containment reference '{@link gapwright.model.CurveAtTemperature#getCurve <em>Curve</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference '<em>Curve</em>'.
+	 * @see gapwright.model.CurveAtTemperature#getCurve()
+	 * @see #getCurveAtTemperature()
+	 * @generated
+	 */
+	EReference getCurveAtTemperature_Curve();
+
+	/**
+	 * Returns the meta object for class '{@link gapwright.model.InitialPermeability <em>Initial Permeability</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Initial Permeability</em>'.
+	 * @see gapwright.model.InitialPermeability
+	 * @generated
+	 */
+	EClass getInitialPermeability();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.InitialPermeability#getTemperature <em>Temperature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Temperature</em>'.
+	 * @see gapwright.model.InitialPermeability#getTemperature()
+	 * @see #getInitialPermeability()
+	 * @generated
+	 */
+	EAttribute getInitialPermeability_Temperature();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.InitialPermeability#getRelativePermeability <em>Relative Permeability</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Relative Permeability</em>'.
+	 * @see gapwright.model.InitialPermeability#getRelativePermeability()
+	 * @see #getInitialPermeability()
+	 * @generated
+	 */
+	EAttribute getInitialPermeability_RelativePermeability();
+
+	/**
 	 * Returns the meta object for class '{@link gapwright.model.SteinmetzLoss <em>Steinmetz Loss</em>}'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -2738,6 +3448,17 @@ public interface GapwrightPackage extends EPackage {
 	EAttribute getVoltageDrive_Bias();
 
 	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.VoltageDrive#getWaveform <em>Waveform</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Waveform</em>'.
+	 * @see gapwright.model.VoltageDrive#getWaveform()
+	 * @see #getVoltageDrive()
+	 * @generated
+	 */
+	EAttribute getVoltageDrive_Waveform();
+
+	/**
 	 * Returns the meta object for class '{@link gapwright.model.Limits <em>Limits</em>}'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -2759,6 +3480,233 @@ public interface GapwrightPackage extends EPackage {
 	EAttribute getLimits_NearFraction();
 
 	/**
+	 * Returns the meta object for class '{@link gapwright.model.WindingLeakage <em>Winding Leakage</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Winding Leakage</em>'.
+	 * @see gapwright.model.WindingLeakage
+	 * @generated
+	 */
+	EClass getWindingLeakage();
+
+	/**
+	 * Returns the meta object for the reference '{@link gapwright.model.WindingLeakage#getFirst <em>First</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the reference '<em>First</em>'.
+	 * @see gapwright.model.WindingLeakage#getFirst()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EReference getWindingLeakage_First();
+
+	/**
+	 * Returns the meta object for the reference '{@link gapwright.model.WindingLeakage#getSecond <em>Second</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the reference '<em>Second</em>'.
+	 * @see gapwright.model.WindingLeakage#getSecond()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EReference getWindingLeakage_Second();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingLeakage#getArrangement <em>Arrangement</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Arrangement</em>'.
+	 * @see gapwright.model.WindingLeakage#getArrangement()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EAttribute getWindingLeakage_Arrangement();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingLeakage#getFirstBuild <em>First Build</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>First Build</em>'.
+	 * @see gapwright.model.WindingLeakage#getFirstBuild()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EAttribute getWindingLeakage_FirstBuild();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingLeakage#getSecondBuild <em>Second Build</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Second Build</em>'.
+	 * @see gapwright.model.WindingLeakage#getSecondBuild()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EAttribute getWindingLeakage_SecondBuild();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingLeakage#getSeparation <em>Separation</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Separation</em>'.
+	 * @see gapwright.model.WindingLeakage#getSeparation()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EAttribute getWindingLeakage_Separation();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingLeakage#getHeight <em>Height</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Height</em>'.
+	 * @see gapwright.model.WindingLeakage#getHeight()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EAttribute getWindingLeakage_Height();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingLeakage#getMeanTurn <em>Mean Turn</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Mean Turn</em>'.
+	 * @see gapwright.model.WindingLeakage#getMeanTurn()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EAttribute getWindingLeakage_MeanTurn();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingLeakage#getInterfaces <em>Interfaces</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Interfaces</em>'.
+	 * @see gapwright.model.WindingLeakage#getInterfaces()
+	 * @see #getWindingLeakage()
+	 * @generated
+	 */
+	EAttribute getWindingLeakage_Interfaces();
+
+	/**
+	 * Returns the meta object for class '{@link gapwright.model.WindingConnection <em>Winding Connection</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Winding Connection</em>'.
+	 * @see gapwright.model.WindingConnection
+	 * @generated
+	 */
+	EClass getWindingConnection();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.WindingConnection#getKind <em>Kind</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Kind</em>'.
+	 * @see gapwright.model.WindingConnection#getKind()
+	 * @see #getWindingConnection()
+	 * @generated
+	 */
+	EAttribute getWindingConnection_Kind();
+
+	/**
+	 * Returns the meta object for the containment reference list '{@link gapwright.model.WindingConnection#getMembers <em>Members</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference list '<em>Members</em>'.
+	 * @see gapwright.model.WindingConnection#getMembers()
+	 * @see #getWindingConnection()
+	 * @generated
+	 */
+	EReference getWindingConnection_Members();
+
+	/**
+	 * Returns the meta object for class '{@link gapwright.model.ConnectedWinding <em>Connected Winding</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Connected Winding</em>'.
+	 * @see gapwright.model.ConnectedWinding
+	 * @generated
+	 */
+	EClass getConnectedWinding();
+
+	/**
+	 * Returns the meta object for the reference '{@link gapwright.model.ConnectedWinding#getWinding <em>Winding</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the reference '<em>Winding</em>'.
+	 * @see gapwright.model.ConnectedWinding#getWinding()
+	 * @see #getConnectedWinding()
+	 * @generated
+	 */
+	EReference getConnectedWinding_Winding();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.ConnectedWinding#isReversed <em>Reversed</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Reversed</em>'.
+	 * @see gapwright.model.ConnectedWinding#isReversed()
+	 * @see #getConnectedWinding()
+	 * @generated
+	 */
+	EAttribute getConnectedWinding_Reversed();
+
+	/**
+	 * Returns the meta object for class '{@link gapwright.model.Tolerance <em>Tolerance</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Tolerance</em>'.
+	 * @see gapwright.model.Tolerance
+	 * @generated
+	 */
+	EClass getTolerance();
+
+	/**
+	 * Returns the meta object for the reference list '{@link gapwright.model.Tolerance#getTargets <em>Targets</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the reference list '<em>Targets</em>'.
+	 * @see gapwright.model.Tolerance#getTargets()
+	 * @see #getTolerance()
+	 * @generated
+	 */
+	EReference getTolerance_Targets();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.Tolerance#getFeature <em>Feature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Feature</em>'.
+	 * @see gapwright.model.Tolerance#getFeature()
+	 * @see #getTolerance()
+	 * @generated
+	 */
+	EAttribute getTolerance_Feature();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.Tolerance#getDeviation <em>Deviation</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Deviation</em>'.
+	 * @see gapwright.model.Tolerance#getDeviation()
+	 * @see #getTolerance()
+	 * @generated
+	 */
+	EAttribute getTolerance_Deviation();
+
+	/**
+	 * Returns the meta object for the attribute '{@link gapwright.model.Tolerance#getDistribution <em>Distribution</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Distribution</em>'.
+	 * @see gapwright.model.Tolerance#getDistribution()
+	 * @see #getTolerance()
+	 * @generated
+	 */
+	EAttribute getTolerance_Distribution();
+
+	/**
 	 * Returns the meta object for enum '{@link gapwright.model.SectionShape <em>Section Shape</em>}'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -2777,6 +3725,76 @@ public interface GapwrightPackage extends EPackage {
 	 * @generated
 	 */
 	EEnum getFringing();
+
+	/**
+	 * Returns the meta object for enum '{@link gapwright.model.GapPlace <em>Gap Place</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Gap Place</em>'.
+	 * @see gapwright.model.GapPlace
+	 * @generated
+	 */
+	EEnum getGapPlace();
+
+	/**
+	 * Returns the meta object for enum '{@link gapwright.model.CurveScaling <em>Curve Scaling</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Curve Scaling</em>'.
+	 * @see gapwright.model.CurveScaling
+	 * @generated
+	 */
+	EEnum getCurveScaling();
+
+	/**
+	 * Returns the meta object for enum '{@link gapwright.model.VoltageWaveform <em>Voltage Waveform</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Voltage Waveform</em>'.
+	 * @see gapwright.model.VoltageWaveform
+	 * @generated
+	 */
+	EEnum getVoltageWaveform();
+
+	/**
+	 * Returns the meta object for enum '{@link gapwright.model.WindingArrangement <em>Winding Arrangement</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Winding Arrangement</em>'.
+	 * @see gapwright.model.WindingArrangement
+	 * @generated
+	 */
+	EEnum getWindingArrangement();
+
+	/**
+	 * Returns the meta object for enum '{@link gapwright.model.ConnectionKind <em>Connection Kind</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Connection Kind</em>'.
+	 * @see gapwright.model.ConnectionKind
+	 * @generated
+	 */
+	EEnum getConnectionKind();
+
+	/**
+	 * Returns the meta object for enum '{@link gapwright.model.TolerancedFeature <em>Toleranced Feature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Toleranced Feature</em>'.
+	 * @see gapwright.model.TolerancedFeature
+	 * @generated
+	 */
+	EEnum getTolerancedFeature();
+
+	/**
+	 * Returns the meta object for enum '{@link gapwright.model.Distribution <em>Distribution</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Distribution</em>'.
+	 * @see gapwright.model.Distribution
+	 * @generated
+	 */
+	EEnum getDistribution();
 
 	/**
 	 * Returns the meta object for data type '{@link gapwright.model.quantity.Quantity <em>Length</em>}'.
@@ -2961,6 +3979,20 @@ public interface GapwrightPackage extends EPackage {
 	EDataType getWire();
 
 	/**
+	 * Returns the meta object for data type '{@link gapwright.model.quantity.Quantity <em>Deviation</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+     * <!-- begin-model-doc -->
+     * A share in % or an amount with its unit, for example 10 % or 0.05 mm.
+     * <!-- end-model-doc -->
+	 * @return the meta object for data type '<em>Deviation</em>'.
+	 * @see gapwright.model.quantity.Quantity
+	 * @model instanceClass="gapwright.model.quantity.Quantity"
+	 * @generated
+	 */
+	EDataType getDeviation();
+
+	/**
 	 * Returns the factory that creates the instances of the model.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -3063,6 +4095,30 @@ public interface GapwrightPackage extends EPackage {
 		 * @generated
 		 */
 		EReference DESIGN__LIMITS = eINSTANCE.getDesign_Limits();
+
+		/**
+		 * The meta object literal for the '<em><b>Leakages</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference DESIGN__LEAKAGES = eINSTANCE.getDesign_Leakages();
+
+		/**
+		 * The meta object literal for the '<em><b>Connections</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference DESIGN__CONNECTIONS = eINSTANCE.getDesign_Connections();
+
+		/**
+		 * The meta object literal for the '<em><b>Tolerances</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference DESIGN__TOLERANCES = eINSTANCE.getDesign_Tolerances();
 
 		/**
 		 * The meta object literal for the '{@link gapwright.model.impl.ElementImpl <em>Element</em>}' class.
@@ -3273,6 +4329,14 @@ public interface GapwrightPackage extends EPackage {
 		EAttribute GAP__POSITION = eINSTANCE.getGap_Position();
 
 		/**
+		 * The meta object literal for the '<em><b>Place</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute GAP__PLACE = eINSTANCE.getGap_Place();
+
+		/**
 		 * The meta object literal for the '{@link gapwright.model.impl.MagnetImpl <em>Magnet</em>}' class.
 		 * <!-- begin-user-doc -->
 		 * <!-- end-user-doc -->
@@ -3371,6 +4435,14 @@ public interface GapwrightPackage extends EPackage {
 		 * @generated
 		 */
 		EAttribute AIR_PATH__LENGTH = eINSTANCE.getAirPath_Length();
+
+		/**
+		 * The meta object literal for the '<em><b>Leakage</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute AIR_PATH__LEAKAGE = eINSTANCE.getAirPath_Leakage();
 
 		/**
 		 * The meta object literal for the '{@link gapwright.model.impl.WindingImpl <em>Winding</em>}' class.
@@ -3497,6 +4569,46 @@ public interface GapwrightPackage extends EPackage {
 		 * @generated
 		 */
 		EAttribute MATERIAL__SOURCE = eINSTANCE.getMaterial_Source();
+
+		/**
+		 * The meta object literal for the '<em><b>Curve Temperature</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute MATERIAL__CURVE_TEMPERATURE = eINSTANCE.getMaterial_CurveTemperature();
+
+		/**
+		 * The meta object literal for the '<em><b>Curve Scaling</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute MATERIAL__CURVE_SCALING = eINSTANCE.getMaterial_CurveScaling();
+
+		/**
+		 * The meta object literal for the '<em><b>Other Curves</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference MATERIAL__OTHER_CURVES = eINSTANCE.getMaterial_OtherCurves();
+
+		/**
+		 * The meta object literal for the '<em><b>Permeabilities</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference MATERIAL__PERMEABILITIES = eINSTANCE.getMaterial_Permeabilities();
+
+		/**
+		 * The meta object literal for the '<em><b>Curie Temperature</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute MATERIAL__CURIE_TEMPERATURE = eINSTANCE.getMaterial_CurieTemperature();
 
 		/**
 		 * The meta object literal for the '{@link gapwright.model.impl.CurveImpl <em>Curve</em>}' class.
@@ -3683,6 +4795,58 @@ public interface GapwrightPackage extends EPackage {
 		EAttribute SATURATION__FLUX_DENSITY = eINSTANCE.getSaturation_FluxDensity();
 
 		/**
+		 * The meta object literal for the '{@link gapwright.model.impl.CurveAtTemperatureImpl <em>Curve At Temperature</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.impl.CurveAtTemperatureImpl
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getCurveAtTemperature()
+		 * @generated
+		 */
+		EClass CURVE_AT_TEMPERATURE = eINSTANCE.getCurveAtTemperature();
+
+		/**
+		 * The meta object literal for the '<em><b>Temperature</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CURVE_AT_TEMPERATURE__TEMPERATURE = eINSTANCE.getCurveAtTemperature_Temperature();
+
+		/**
+		 * The meta object literal for the '<em><b>Curve</b></em>' containment reference feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference CURVE_AT_TEMPERATURE__CURVE = eINSTANCE.getCurveAtTemperature_Curve();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.impl.InitialPermeabilityImpl <em>Initial Permeability</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.impl.InitialPermeabilityImpl
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getInitialPermeability()
+		 * @generated
+		 */
+		EClass INITIAL_PERMEABILITY = eINSTANCE.getInitialPermeability();
+
+		/**
+		 * The meta object literal for the '<em><b>Temperature</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute INITIAL_PERMEABILITY__TEMPERATURE = eINSTANCE.getInitialPermeability_Temperature();
+
+		/**
+		 * The meta object literal for the '<em><b>Relative Permeability</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute INITIAL_PERMEABILITY__RELATIVE_PERMEABILITY = eINSTANCE.getInitialPermeability_RelativePermeability();
+
+		/**
 		 * The meta object literal for the '{@link gapwright.model.impl.SteinmetzLossImpl <em>Steinmetz Loss</em>}' class.
 		 * <!-- begin-user-doc -->
 		 * <!-- end-user-doc -->
@@ -3853,6 +5017,14 @@ public interface GapwrightPackage extends EPackage {
 		EAttribute VOLTAGE_DRIVE__BIAS = eINSTANCE.getVoltageDrive_Bias();
 
 		/**
+		 * The meta object literal for the '<em><b>Waveform</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute VOLTAGE_DRIVE__WAVEFORM = eINSTANCE.getVoltageDrive_Waveform();
+
+		/**
 		 * The meta object literal for the '{@link gapwright.model.impl.LimitsImpl <em>Limits</em>}' class.
 		 * <!-- begin-user-doc -->
 		 * <!-- end-user-doc -->
@@ -3869,6 +5041,182 @@ public interface GapwrightPackage extends EPackage {
 		 * @generated
 		 */
 		EAttribute LIMITS__NEAR_FRACTION = eINSTANCE.getLimits_NearFraction();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.impl.WindingLeakageImpl <em>Winding Leakage</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.impl.WindingLeakageImpl
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getWindingLeakage()
+		 * @generated
+		 */
+		EClass WINDING_LEAKAGE = eINSTANCE.getWindingLeakage();
+
+		/**
+		 * The meta object literal for the '<em><b>First</b></em>' reference feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference WINDING_LEAKAGE__FIRST = eINSTANCE.getWindingLeakage_First();
+
+		/**
+		 * The meta object literal for the '<em><b>Second</b></em>' reference feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference WINDING_LEAKAGE__SECOND = eINSTANCE.getWindingLeakage_Second();
+
+		/**
+		 * The meta object literal for the '<em><b>Arrangement</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_LEAKAGE__ARRANGEMENT = eINSTANCE.getWindingLeakage_Arrangement();
+
+		/**
+		 * The meta object literal for the '<em><b>First Build</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_LEAKAGE__FIRST_BUILD = eINSTANCE.getWindingLeakage_FirstBuild();
+
+		/**
+		 * The meta object literal for the '<em><b>Second Build</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_LEAKAGE__SECOND_BUILD = eINSTANCE.getWindingLeakage_SecondBuild();
+
+		/**
+		 * The meta object literal for the '<em><b>Separation</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_LEAKAGE__SEPARATION = eINSTANCE.getWindingLeakage_Separation();
+
+		/**
+		 * The meta object literal for the '<em><b>Height</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_LEAKAGE__HEIGHT = eINSTANCE.getWindingLeakage_Height();
+
+		/**
+		 * The meta object literal for the '<em><b>Mean Turn</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_LEAKAGE__MEAN_TURN = eINSTANCE.getWindingLeakage_MeanTurn();
+
+		/**
+		 * The meta object literal for the '<em><b>Interfaces</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_LEAKAGE__INTERFACES = eINSTANCE.getWindingLeakage_Interfaces();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.impl.WindingConnectionImpl <em>Winding Connection</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.impl.WindingConnectionImpl
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getWindingConnection()
+		 * @generated
+		 */
+		EClass WINDING_CONNECTION = eINSTANCE.getWindingConnection();
+
+		/**
+		 * The meta object literal for the '<em><b>Kind</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute WINDING_CONNECTION__KIND = eINSTANCE.getWindingConnection_Kind();
+
+		/**
+		 * The meta object literal for the '<em><b>Members</b></em>' containment reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference WINDING_CONNECTION__MEMBERS = eINSTANCE.getWindingConnection_Members();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.impl.ConnectedWindingImpl <em>Connected Winding</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.impl.ConnectedWindingImpl
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getConnectedWinding()
+		 * @generated
+		 */
+		EClass CONNECTED_WINDING = eINSTANCE.getConnectedWinding();
+
+		/**
+		 * The meta object literal for the '<em><b>Winding</b></em>' reference feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference CONNECTED_WINDING__WINDING = eINSTANCE.getConnectedWinding_Winding();
+
+		/**
+		 * The meta object literal for the '<em><b>Reversed</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CONNECTED_WINDING__REVERSED = eINSTANCE.getConnectedWinding_Reversed();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.impl.ToleranceImpl <em>Tolerance</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.impl.ToleranceImpl
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getTolerance()
+		 * @generated
+		 */
+		EClass TOLERANCE = eINSTANCE.getTolerance();
+
+		/**
+		 * The meta object literal for the '<em><b>Targets</b></em>' reference list feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference TOLERANCE__TARGETS = eINSTANCE.getTolerance_Targets();
+
+		/**
+		 * The meta object literal for the '<em><b>Feature</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute TOLERANCE__FEATURE = eINSTANCE.getTolerance_Feature();
+
+		/**
+		 * The meta object literal for the '<em><b>Deviation</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute TOLERANCE__DEVIATION = eINSTANCE.getTolerance_Deviation();
+
+		/**
+		 * The meta object literal for the '<em><b>Distribution</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute TOLERANCE__DISTRIBUTION = eINSTANCE.getTolerance_Distribution();
 
 		/**
 		 * The meta object literal for the '{@link gapwright.model.SectionShape <em>Section Shape</em>}' enum.
@@ -3889,6 +5237,76 @@ public interface GapwrightPackage extends EPackage {
 		 * @generated
 		 */
 		EEnum FRINGING = eINSTANCE.getFringing();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.GapPlace <em>Gap Place</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.GapPlace
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getGapPlace()
+		 * @generated
+		 */
+		EEnum GAP_PLACE = eINSTANCE.getGapPlace();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.CurveScaling <em>Curve Scaling</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.CurveScaling
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getCurveScaling()
+		 * @generated
+		 */
+		EEnum CURVE_SCALING = eINSTANCE.getCurveScaling();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.VoltageWaveform <em>Voltage Waveform</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.VoltageWaveform
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getVoltageWaveform()
+		 * @generated
+		 */
+		EEnum VOLTAGE_WAVEFORM = eINSTANCE.getVoltageWaveform();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.WindingArrangement <em>Winding Arrangement</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.WindingArrangement
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getWindingArrangement()
+		 * @generated
+		 */
+		EEnum WINDING_ARRANGEMENT = eINSTANCE.getWindingArrangement();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.ConnectionKind <em>Connection Kind</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.ConnectionKind
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getConnectionKind()
+		 * @generated
+		 */
+		EEnum CONNECTION_KIND = eINSTANCE.getConnectionKind();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.TolerancedFeature <em>Toleranced Feature</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.TolerancedFeature
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getTolerancedFeature()
+		 * @generated
+		 */
+		EEnum TOLERANCED_FEATURE = eINSTANCE.getTolerancedFeature();
+
+		/**
+		 * The meta object literal for the '{@link gapwright.model.Distribution <em>Distribution</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.Distribution
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getDistribution()
+		 * @generated
+		 */
+		EEnum DISTRIBUTION = eINSTANCE.getDistribution();
 
 		/**
 		 * The meta object literal for the '<em>Length</em>' data type.
@@ -4019,6 +5437,16 @@ public interface GapwrightPackage extends EPackage {
 		 * @generated
 		 */
 		EDataType WIRE = eINSTANCE.getWire();
+
+		/**
+		 * The meta object literal for the '<em>Deviation</em>' data type.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see gapwright.model.quantity.Quantity
+		 * @see gapwright.model.impl.GapwrightPackageImpl#getDeviation()
+		 * @generated
+		 */
+		EDataType DEVIATION = eINSTANCE.getDeviation();
 
 	}
 

@@ -20,6 +20,7 @@ import gapwright.model.quantity.Quantity;
  *   <li>{@link gapwright.model.VoltageDrive#getVoltage <em>Voltage</em>}</li>
  *   <li>{@link gapwright.model.VoltageDrive#getOnTime <em>On Time</em>}</li>
  *   <li>{@link gapwright.model.VoltageDrive#getBias <em>Bias</em>}</li>
+ *   <li>{@link gapwright.model.VoltageDrive#getWaveform <em>Waveform</em>}</li>
  * </ul>
  *
  * @see gapwright.model.GapwrightPackage#getVoltageDrive()
@@ -96,5 +97,33 @@ public interface VoltageDrive extends Drive {
 	 * @generated
 	 */
 	void setBias(Quantity value);
+
+	/**
+	 * Returns the value of the '<em><b>Waveform</b></em>' attribute.
+	 * The literals are from the enumeration {@link gapwright.model.VoltageWaveform}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Shape of the voltage during the on-time; decides the volt-seconds.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Waveform</em>' attribute.
+	 * @see gapwright.model.VoltageWaveform
+	 * @see #setWaveform(VoltageWaveform)
+	 * @see gapwright.model.GapwrightPackage#getVoltageDrive_Waveform()
+	 * @model
+	 * @generated
+	 */
+	VoltageWaveform getWaveform();
+
+	/**
+	 * Sets the value of the '{@link gapwright.model.VoltageDrive#getWaveform <em>Waveform</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @param value the new value of the '<em>Waveform</em>' attribute.
+	 * @see gapwright.model.VoltageWaveform
+	 * @see #getWaveform()
+	 * @generated
+	 */
+	void setWaveform(VoltageWaveform value);
 
 } // VoltageDrive

@@ -251,7 +251,10 @@ final class FileChecker {
 		}
 		EStructuralFeature feature = plainName ? type.getEStructuralFeature(name) : null;
 		if (feature instanceof EReference reference && !reference.isContainment()) {
-			references.add(new Reference(element, reference, value, line));
+			String[] ids = reference.isMany() ? value.strip().split("\\s+") : new String[] { value };
+			for (String id : ids) {
+				references.add(new Reference(element, reference, id, line));
+			}
 		} else if (feature instanceof EAttribute attribute) {
 			String expected = AttributeText.problem(attribute, value);
 			if (expected != null) {

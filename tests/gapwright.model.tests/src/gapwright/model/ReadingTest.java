@@ -239,7 +239,7 @@ class ReadingTest {
 						+ " urn:x (line 10)");
 		refuses("<gaps id", "<gaps xmlns:x=\"urn:x\" x:length=\"1 mm\" id",
 				"small.gapwright:gap: length = '1 mm': no such attribute in a gap, allowed are id, name, length, pieces,"
-						+ " fringing, windowHeight, position (line 10)");
+						+ " fringing, windowHeight, position, place (line 10)");
 	}
 
 	@Test

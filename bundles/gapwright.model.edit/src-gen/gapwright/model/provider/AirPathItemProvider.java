@@ -50,6 +50,7 @@ public class AirPathItemProvider extends ElementItemProvider {
 			addPermeancePropertyDescriptor(object);
 			addAreaPropertyDescriptor(object);
 			addLengthPropertyDescriptor(object);
+			addLeakagePropertyDescriptor(object);
 		}
 		return itemPropertyDescriptors;
 	}
@@ -165,6 +166,28 @@ public class AirPathItemProvider extends ElementItemProvider {
 	}
 
 	/**
+	 * This adds a property descriptor for the Leakage feature.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected void addLeakagePropertyDescriptor(Object object) {
+		itemPropertyDescriptors.add
+			(createItemPropertyDescriptor
+				(((ComposeableAdapterFactory)adapterFactory).getRootAdapterFactory(),
+				 getResourceLocator(),
+				 getString("_UI_AirPath_leakage_feature"),
+				 getString("_UI_PropertyDescriptor_description", "_UI_AirPath_leakage_feature", "_UI_AirPath_type"),
+				 GapwrightPackage.Literals.AIR_PATH__LEAKAGE,
+				 true,
+				 false,
+				 false,
+				 ItemPropertyDescriptor.BOOLEAN_VALUE_IMAGE,
+				 null,
+				 null));
+	}
+
+	/**
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
@@ -204,6 +227,7 @@ public class AirPathItemProvider extends ElementItemProvider {
 			case GapwrightPackage.AIR_PATH__PERMEANCE:
 			case GapwrightPackage.AIR_PATH__AREA:
 			case GapwrightPackage.AIR_PATH__LENGTH:
+			case GapwrightPackage.AIR_PATH__LEAKAGE:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), false, true));
 				return;
 		}

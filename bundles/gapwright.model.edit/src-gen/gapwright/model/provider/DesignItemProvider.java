@@ -132,6 +132,9 @@ public class DesignItemProvider
 			childrenFeatures.add(GapwrightPackage.Literals.DESIGN__WINDINGS);
 			childrenFeatures.add(GapwrightPackage.Literals.DESIGN__OPERATING_POINTS);
 			childrenFeatures.add(GapwrightPackage.Literals.DESIGN__LIMITS);
+			childrenFeatures.add(GapwrightPackage.Literals.DESIGN__LEAKAGES);
+			childrenFeatures.add(GapwrightPackage.Literals.DESIGN__CONNECTIONS);
+			childrenFeatures.add(GapwrightPackage.Literals.DESIGN__TOLERANCES);
 		}
 		return childrenFeatures;
 	}
@@ -197,6 +200,9 @@ public class DesignItemProvider
 			case GapwrightPackage.DESIGN__WINDINGS:
 			case GapwrightPackage.DESIGN__OPERATING_POINTS:
 			case GapwrightPackage.DESIGN__LIMITS:
+			case GapwrightPackage.DESIGN__LEAKAGES:
+			case GapwrightPackage.DESIGN__CONNECTIONS:
+			case GapwrightPackage.DESIGN__TOLERANCES:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), true, false));
 				return;
 		}
@@ -248,6 +254,21 @@ public class DesignItemProvider
 			(createChildParameter
 				(GapwrightPackage.Literals.DESIGN__LIMITS,
 				 GapwrightFactory.eINSTANCE.createLimits()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(GapwrightPackage.Literals.DESIGN__LEAKAGES,
+				 GapwrightFactory.eINSTANCE.createWindingLeakage()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(GapwrightPackage.Literals.DESIGN__CONNECTIONS,
+				 GapwrightFactory.eINSTANCE.createWindingConnection()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(GapwrightPackage.Literals.DESIGN__TOLERANCES,
+				 GapwrightFactory.eINSTANCE.createTolerance()));
 	}
 
 	/**

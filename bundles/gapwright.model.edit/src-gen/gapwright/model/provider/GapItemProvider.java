@@ -50,6 +50,7 @@ public class GapItemProvider extends ElementItemProvider {
 			addFringingPropertyDescriptor(object);
 			addWindowHeightPropertyDescriptor(object);
 			addPositionPropertyDescriptor(object);
+			addPlacePropertyDescriptor(object);
 		}
 		return itemPropertyDescriptors;
 	}
@@ -165,6 +166,28 @@ public class GapItemProvider extends ElementItemProvider {
 	}
 
 	/**
+	 * This adds a property descriptor for the Place feature.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected void addPlacePropertyDescriptor(Object object) {
+		itemPropertyDescriptors.add
+			(createItemPropertyDescriptor
+				(((ComposeableAdapterFactory)adapterFactory).getRootAdapterFactory(),
+				 getResourceLocator(),
+				 getString("_UI_Gap_place_feature"),
+				 getString("_UI_PropertyDescriptor_description", "_UI_Gap_place_feature", "_UI_Gap_type"),
+				 GapwrightPackage.Literals.GAP__PLACE,
+				 true,
+				 false,
+				 false,
+				 ItemPropertyDescriptor.GENERIC_VALUE_IMAGE,
+				 null,
+				 null));
+	}
+
+	/**
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
@@ -206,6 +229,7 @@ public class GapItemProvider extends ElementItemProvider {
 			case GapwrightPackage.GAP__FRINGING:
 			case GapwrightPackage.GAP__WINDOW_HEIGHT:
 			case GapwrightPackage.GAP__POSITION:
+			case GapwrightPackage.GAP__PLACE:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), false, true));
 				return;
 		}

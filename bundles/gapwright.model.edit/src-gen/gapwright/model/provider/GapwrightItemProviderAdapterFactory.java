@@ -440,6 +440,52 @@ public class GapwrightItemProviderAdapterFactory extends GapwrightAdapterFactory
 	}
 
 	/**
+	 * This keeps track of the one adapter used for all {@link gapwright.model.CurveAtTemperature} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected CurveAtTemperatureItemProvider curveAtTemperatureItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link gapwright.model.CurveAtTemperature}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createCurveAtTemperatureAdapter() {
+		if (curveAtTemperatureItemProvider == null) {
+			curveAtTemperatureItemProvider = new CurveAtTemperatureItemProvider(this);
+		}
+
+		return curveAtTemperatureItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link gapwright.model.InitialPermeability} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected InitialPermeabilityItemProvider initialPermeabilityItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link gapwright.model.InitialPermeability}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createInitialPermeabilityAdapter() {
+		if (initialPermeabilityItemProvider == null) {
+			initialPermeabilityItemProvider = new InitialPermeabilityItemProvider(this);
+		}
+
+		return initialPermeabilityItemProvider;
+	}
+
+	/**
 	 * This keeps track of the one adapter used for all {@link gapwright.model.SteinmetzLoss} instances.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -552,6 +598,98 @@ public class GapwrightItemProviderAdapterFactory extends GapwrightAdapterFactory
 		}
 
 		return limitsItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link gapwright.model.WindingLeakage} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected WindingLeakageItemProvider windingLeakageItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link gapwright.model.WindingLeakage}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createWindingLeakageAdapter() {
+		if (windingLeakageItemProvider == null) {
+			windingLeakageItemProvider = new WindingLeakageItemProvider(this);
+		}
+
+		return windingLeakageItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link gapwright.model.WindingConnection} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected WindingConnectionItemProvider windingConnectionItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link gapwright.model.WindingConnection}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createWindingConnectionAdapter() {
+		if (windingConnectionItemProvider == null) {
+			windingConnectionItemProvider = new WindingConnectionItemProvider(this);
+		}
+
+		return windingConnectionItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link gapwright.model.ConnectedWinding} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected ConnectedWindingItemProvider connectedWindingItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link gapwright.model.ConnectedWinding}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createConnectedWindingAdapter() {
+		if (connectedWindingItemProvider == null) {
+			connectedWindingItemProvider = new ConnectedWindingItemProvider(this);
+		}
+
+		return connectedWindingItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link gapwright.model.Tolerance} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected ToleranceItemProvider toleranceItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link gapwright.model.Tolerance}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createToleranceAdapter() {
+		if (toleranceItemProvider == null) {
+			toleranceItemProvider = new ToleranceItemProvider(this);
+		}
+
+		return toleranceItemProvider;
 	}
 
 	/**
@@ -675,11 +813,17 @@ public class GapwrightItemProviderAdapterFactory extends GapwrightAdapterFactory
 		if (curvePointItemProvider != null) curvePointItemProvider.dispose();
 		if (rollOffCurveItemProvider != null) rollOffCurveItemProvider.dispose();
 		if (saturationItemProvider != null) saturationItemProvider.dispose();
+		if (curveAtTemperatureItemProvider != null) curveAtTemperatureItemProvider.dispose();
+		if (initialPermeabilityItemProvider != null) initialPermeabilityItemProvider.dispose();
 		if (steinmetzLossItemProvider != null) steinmetzLossItemProvider.dispose();
 		if (operatingPointItemProvider != null) operatingPointItemProvider.dispose();
 		if (currentDriveItemProvider != null) currentDriveItemProvider.dispose();
 		if (voltageDriveItemProvider != null) voltageDriveItemProvider.dispose();
 		if (limitsItemProvider != null) limitsItemProvider.dispose();
+		if (windingLeakageItemProvider != null) windingLeakageItemProvider.dispose();
+		if (windingConnectionItemProvider != null) windingConnectionItemProvider.dispose();
+		if (connectedWindingItemProvider != null) connectedWindingItemProvider.dispose();
+		if (toleranceItemProvider != null) toleranceItemProvider.dispose();
 	}
 
 }

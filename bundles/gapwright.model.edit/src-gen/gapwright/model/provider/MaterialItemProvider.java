@@ -50,6 +50,9 @@ public class MaterialItemProvider extends ElementItemProvider {
 
 			addDensityPropertyDescriptor(object);
 			addSourcePropertyDescriptor(object);
+			addCurveTemperaturePropertyDescriptor(object);
+			addCurveScalingPropertyDescriptor(object);
+			addCurieTemperaturePropertyDescriptor(object);
 		}
 		return itemPropertyDescriptors;
 	}
@@ -99,6 +102,72 @@ public class MaterialItemProvider extends ElementItemProvider {
 	}
 
 	/**
+	 * This adds a property descriptor for the Curve Temperature feature.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected void addCurveTemperaturePropertyDescriptor(Object object) {
+		itemPropertyDescriptors.add
+			(createItemPropertyDescriptor
+				(((ComposeableAdapterFactory)adapterFactory).getRootAdapterFactory(),
+				 getResourceLocator(),
+				 getString("_UI_Material_curveTemperature_feature"),
+				 getString("_UI_PropertyDescriptor_description", "_UI_Material_curveTemperature_feature", "_UI_Material_type"),
+				 GapwrightPackage.Literals.MATERIAL__CURVE_TEMPERATURE,
+				 true,
+				 false,
+				 false,
+				 ItemPropertyDescriptor.GENERIC_VALUE_IMAGE,
+				 null,
+				 null));
+	}
+
+	/**
+	 * This adds a property descriptor for the Curve Scaling feature.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected void addCurveScalingPropertyDescriptor(Object object) {
+		itemPropertyDescriptors.add
+			(createItemPropertyDescriptor
+				(((ComposeableAdapterFactory)adapterFactory).getRootAdapterFactory(),
+				 getResourceLocator(),
+				 getString("_UI_Material_curveScaling_feature"),
+				 getString("_UI_PropertyDescriptor_description", "_UI_Material_curveScaling_feature", "_UI_Material_type"),
+				 GapwrightPackage.Literals.MATERIAL__CURVE_SCALING,
+				 true,
+				 false,
+				 false,
+				 ItemPropertyDescriptor.GENERIC_VALUE_IMAGE,
+				 null,
+				 null));
+	}
+
+	/**
+	 * This adds a property descriptor for the Curie Temperature feature.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected void addCurieTemperaturePropertyDescriptor(Object object) {
+		itemPropertyDescriptors.add
+			(createItemPropertyDescriptor
+				(((ComposeableAdapterFactory)adapterFactory).getRootAdapterFactory(),
+				 getResourceLocator(),
+				 getString("_UI_Material_curieTemperature_feature"),
+				 getString("_UI_PropertyDescriptor_description", "_UI_Material_curieTemperature_feature", "_UI_Material_type"),
+				 GapwrightPackage.Literals.MATERIAL__CURIE_TEMPERATURE,
+				 true,
+				 false,
+				 false,
+				 ItemPropertyDescriptor.GENERIC_VALUE_IMAGE,
+				 null,
+				 null));
+	}
+
+	/**
 	 * This specifies how to implement {@link #getChildren} and is used to deduce an appropriate feature for an
 	 * {@link org.eclipse.emf.edit.command.AddCommand}, {@link org.eclipse.emf.edit.command.RemoveCommand} or
 	 * {@link org.eclipse.emf.edit.command.MoveCommand} in {@link #createCommand}.
@@ -113,6 +182,8 @@ public class MaterialItemProvider extends ElementItemProvider {
 			childrenFeatures.add(GapwrightPackage.Literals.MATERIAL__CURVE);
 			childrenFeatures.add(GapwrightPackage.Literals.MATERIAL__SATURATIONS);
 			childrenFeatures.add(GapwrightPackage.Literals.MATERIAL__LOSS);
+			childrenFeatures.add(GapwrightPackage.Literals.MATERIAL__OTHER_CURVES);
+			childrenFeatures.add(GapwrightPackage.Literals.MATERIAL__PERMEABILITIES);
 		}
 		return childrenFeatures;
 	}
@@ -169,11 +240,16 @@ public class MaterialItemProvider extends ElementItemProvider {
 		switch (notification.getFeatureID(Material.class)) {
 			case GapwrightPackage.MATERIAL__DENSITY:
 			case GapwrightPackage.MATERIAL__SOURCE:
+			case GapwrightPackage.MATERIAL__CURVE_TEMPERATURE:
+			case GapwrightPackage.MATERIAL__CURVE_SCALING:
+			case GapwrightPackage.MATERIAL__CURIE_TEMPERATURE:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), false, true));
 				return;
 			case GapwrightPackage.MATERIAL__CURVE:
 			case GapwrightPackage.MATERIAL__SATURATIONS:
 			case GapwrightPackage.MATERIAL__LOSS:
+			case GapwrightPackage.MATERIAL__OTHER_CURVES:
+			case GapwrightPackage.MATERIAL__PERMEABILITIES:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), true, false));
 				return;
 		}
@@ -225,6 +301,16 @@ public class MaterialItemProvider extends ElementItemProvider {
 			(createChildParameter
 				(GapwrightPackage.Literals.MATERIAL__LOSS,
 				 GapwrightFactory.eINSTANCE.createSteinmetzLoss()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(GapwrightPackage.Literals.MATERIAL__OTHER_CURVES,
+				 GapwrightFactory.eINSTANCE.createCurveAtTemperature()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(GapwrightPackage.Literals.MATERIAL__PERMEABILITIES,
+				 GapwrightFactory.eINSTANCE.createInitialPermeability()));
 	}
 
 }

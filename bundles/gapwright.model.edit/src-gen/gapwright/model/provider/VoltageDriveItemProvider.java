@@ -48,6 +48,7 @@ public class VoltageDriveItemProvider extends DriveItemProvider {
 			addVoltagePropertyDescriptor(object);
 			addOnTimePropertyDescriptor(object);
 			addBiasPropertyDescriptor(object);
+			addWaveformPropertyDescriptor(object);
 		}
 		return itemPropertyDescriptors;
 	}
@@ -119,6 +120,28 @@ public class VoltageDriveItemProvider extends DriveItemProvider {
 	}
 
 	/**
+	 * This adds a property descriptor for the Waveform feature.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected void addWaveformPropertyDescriptor(Object object) {
+		itemPropertyDescriptors.add
+			(createItemPropertyDescriptor
+				(((ComposeableAdapterFactory)adapterFactory).getRootAdapterFactory(),
+				 getResourceLocator(),
+				 getString("_UI_VoltageDrive_waveform_feature"),
+				 getString("_UI_PropertyDescriptor_description", "_UI_VoltageDrive_waveform_feature", "_UI_VoltageDrive_type"),
+				 GapwrightPackage.Literals.VOLTAGE_DRIVE__WAVEFORM,
+				 true,
+				 false,
+				 false,
+				 ItemPropertyDescriptor.GENERIC_VALUE_IMAGE,
+				 null,
+				 null));
+	}
+
+	/**
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
@@ -158,6 +181,7 @@ public class VoltageDriveItemProvider extends DriveItemProvider {
 			case GapwrightPackage.VOLTAGE_DRIVE__VOLTAGE:
 			case GapwrightPackage.VOLTAGE_DRIVE__ON_TIME:
 			case GapwrightPackage.VOLTAGE_DRIVE__BIAS:
+			case GapwrightPackage.VOLTAGE_DRIVE__WAVEFORM:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), false, true));
 				return;
 		}

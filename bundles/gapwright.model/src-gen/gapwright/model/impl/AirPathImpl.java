@@ -27,6 +27,7 @@ import org.eclipse.emf.ecore.impl.ENotificationImpl;
  *   <li>{@link gapwright.model.impl.AirPathImpl#getPermeance <em>Permeance</em>}</li>
  *   <li>{@link gapwright.model.impl.AirPathImpl#getArea <em>Area</em>}</li>
  *   <li>{@link gapwright.model.impl.AirPathImpl#getLength <em>Length</em>}</li>
+ *   <li>{@link gapwright.model.impl.AirPathImpl#isLeakage <em>Leakage</em>}</li>
  * </ul>
  *
  * @generated
@@ -111,6 +112,26 @@ public class AirPathImpl extends ElementImpl implements AirPath {
 	 * @ordered
 	 */
 	protected Quantity length = LENGTH_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #isLeakage() <em>Leakage</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #isLeakage()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final boolean LEAKAGE_EDEFAULT = false;
+
+	/**
+	 * The cached value of the '{@link #isLeakage() <em>Leakage</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #isLeakage()
+	 * @generated
+	 * @ordered
+	 */
+	protected boolean leakage = LEAKAGE_EDEFAULT;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -252,6 +273,29 @@ public class AirPathImpl extends ElementImpl implements AirPath {
 	 * @generated
 	 */
 	@Override
+	public boolean isLeakage() {
+		return leakage;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setLeakage(boolean newLeakage) {
+		boolean oldLeakage = leakage;
+		leakage = newLeakage;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, GapwrightPackage.AIR_PATH__LEAKAGE, oldLeakage, leakage));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public Object eGet(int featureID, boolean resolve, boolean coreType) {
 		switch (featureID) {
 			case GapwrightPackage.AIR_PATH__FROM:
@@ -264,6 +308,8 @@ public class AirPathImpl extends ElementImpl implements AirPath {
 				return getArea();
 			case GapwrightPackage.AIR_PATH__LENGTH:
 				return getLength();
+			case GapwrightPackage.AIR_PATH__LEAKAGE:
+				return isLeakage();
 		}
 		return super.eGet(featureID, resolve, coreType);
 	}
@@ -290,6 +336,9 @@ public class AirPathImpl extends ElementImpl implements AirPath {
 				return;
 			case GapwrightPackage.AIR_PATH__LENGTH:
 				setLength((Quantity)newValue);
+				return;
+			case GapwrightPackage.AIR_PATH__LEAKAGE:
+				setLeakage((Boolean)newValue);
 				return;
 		}
 		super.eSet(featureID, newValue);
@@ -318,6 +367,9 @@ public class AirPathImpl extends ElementImpl implements AirPath {
 			case GapwrightPackage.AIR_PATH__LENGTH:
 				setLength(LENGTH_EDEFAULT);
 				return;
+			case GapwrightPackage.AIR_PATH__LEAKAGE:
+				setLeakage(LEAKAGE_EDEFAULT);
+				return;
 		}
 		super.eUnset(featureID);
 	}
@@ -340,6 +392,8 @@ public class AirPathImpl extends ElementImpl implements AirPath {
 				return AREA_EDEFAULT == null ? area != null : !AREA_EDEFAULT.equals(area);
 			case GapwrightPackage.AIR_PATH__LENGTH:
 				return LENGTH_EDEFAULT == null ? length != null : !LENGTH_EDEFAULT.equals(length);
+			case GapwrightPackage.AIR_PATH__LEAKAGE:
+				return leakage != LEAKAGE_EDEFAULT;
 		}
 		return super.eIsSet(featureID);
 	}
@@ -360,6 +414,8 @@ public class AirPathImpl extends ElementImpl implements AirPath {
 		result.append(area);
 		result.append(", length: ");
 		result.append(length);
+		result.append(", leakage: ");
+		result.append(leakage);
 		result.append(')');
 		return result.toString();
 	}

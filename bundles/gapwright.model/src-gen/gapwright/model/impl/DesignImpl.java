@@ -10,7 +10,10 @@ import gapwright.model.Leg;
 import gapwright.model.Limits;
 import gapwright.model.Material;
 import gapwright.model.OperatingPoint;
+import gapwright.model.Tolerance;
 import gapwright.model.Winding;
+import gapwright.model.WindingConnection;
+import gapwright.model.WindingLeakage;
 
 import java.util.Collection;
 
@@ -45,6 +48,9 @@ import org.eclipse.emf.ecore.util.InternalEList;
  *   <li>{@link gapwright.model.impl.DesignImpl#getWindings <em>Windings</em>}</li>
  *   <li>{@link gapwright.model.impl.DesignImpl#getOperatingPoints <em>Operating Points</em>}</li>
  *   <li>{@link gapwright.model.impl.DesignImpl#getLimits <em>Limits</em>}</li>
+ *   <li>{@link gapwright.model.impl.DesignImpl#getLeakages <em>Leakages</em>}</li>
+ *   <li>{@link gapwright.model.impl.DesignImpl#getConnections <em>Connections</em>}</li>
+ *   <li>{@link gapwright.model.impl.DesignImpl#getTolerances <em>Tolerances</em>}</li>
  * </ul>
  *
  * @generated
@@ -159,6 +165,36 @@ public class DesignImpl extends MinimalEObjectImpl.Container implements Design {
 	 * @ordered
 	 */
 	protected Limits limits;
+
+	/**
+	 * The cached value of the '{@link #getLeakages() <em>Leakages</em>}' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getLeakages()
+	 * @generated
+	 * @ordered
+	 */
+	protected EList<WindingLeakage> leakages;
+
+	/**
+	 * The cached value of the '{@link #getConnections() <em>Connections</em>}' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getConnections()
+	 * @generated
+	 * @ordered
+	 */
+	protected EList<WindingConnection> connections;
+
+	/**
+	 * The cached value of the '{@link #getTolerances() <em>Tolerances</em>}' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getTolerances()
+	 * @generated
+	 * @ordered
+	 */
+	protected EList<Tolerance> tolerances;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -354,6 +390,45 @@ public class DesignImpl extends MinimalEObjectImpl.Container implements Design {
 	 * @generated
 	 */
 	@Override
+	public EList<WindingLeakage> getLeakages() {
+		if (leakages == null) {
+			leakages = new EObjectContainmentEList<WindingLeakage>(WindingLeakage.class, this, GapwrightPackage.DESIGN__LEAKAGES);
+		}
+		return leakages;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EList<WindingConnection> getConnections() {
+		if (connections == null) {
+			connections = new EObjectContainmentEList<WindingConnection>(WindingConnection.class, this, GapwrightPackage.DESIGN__CONNECTIONS);
+		}
+		return connections;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EList<Tolerance> getTolerances() {
+		if (tolerances == null) {
+			tolerances = new EObjectContainmentEList<Tolerance>(Tolerance.class, this, GapwrightPackage.DESIGN__TOLERANCES);
+		}
+		return tolerances;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public NotificationChain eInverseRemove(InternalEObject otherEnd, int featureID, NotificationChain msgs) {
 		switch (featureID) {
 			case GapwrightPackage.DESIGN__MATERIALS:
@@ -370,6 +445,12 @@ public class DesignImpl extends MinimalEObjectImpl.Container implements Design {
 				return ((InternalEList<?>)getOperatingPoints()).basicRemove(otherEnd, msgs);
 			case GapwrightPackage.DESIGN__LIMITS:
 				return basicSetLimits(null, msgs);
+			case GapwrightPackage.DESIGN__LEAKAGES:
+				return ((InternalEList<?>)getLeakages()).basicRemove(otherEnd, msgs);
+			case GapwrightPackage.DESIGN__CONNECTIONS:
+				return ((InternalEList<?>)getConnections()).basicRemove(otherEnd, msgs);
+			case GapwrightPackage.DESIGN__TOLERANCES:
+				return ((InternalEList<?>)getTolerances()).basicRemove(otherEnd, msgs);
 		}
 		return super.eInverseRemove(otherEnd, featureID, msgs);
 	}
@@ -400,6 +481,12 @@ public class DesignImpl extends MinimalEObjectImpl.Container implements Design {
 				return getOperatingPoints();
 			case GapwrightPackage.DESIGN__LIMITS:
 				return getLimits();
+			case GapwrightPackage.DESIGN__LEAKAGES:
+				return getLeakages();
+			case GapwrightPackage.DESIGN__CONNECTIONS:
+				return getConnections();
+			case GapwrightPackage.DESIGN__TOLERANCES:
+				return getTolerances();
 		}
 		return super.eGet(featureID, resolve, coreType);
 	}
@@ -446,6 +533,18 @@ public class DesignImpl extends MinimalEObjectImpl.Container implements Design {
 			case GapwrightPackage.DESIGN__LIMITS:
 				setLimits((Limits)newValue);
 				return;
+			case GapwrightPackage.DESIGN__LEAKAGES:
+				getLeakages().clear();
+				getLeakages().addAll((Collection<? extends WindingLeakage>)newValue);
+				return;
+			case GapwrightPackage.DESIGN__CONNECTIONS:
+				getConnections().clear();
+				getConnections().addAll((Collection<? extends WindingConnection>)newValue);
+				return;
+			case GapwrightPackage.DESIGN__TOLERANCES:
+				getTolerances().clear();
+				getTolerances().addAll((Collection<? extends Tolerance>)newValue);
+				return;
 		}
 		super.eSet(featureID, newValue);
 	}
@@ -485,6 +584,15 @@ public class DesignImpl extends MinimalEObjectImpl.Container implements Design {
 			case GapwrightPackage.DESIGN__LIMITS:
 				setLimits((Limits)null);
 				return;
+			case GapwrightPackage.DESIGN__LEAKAGES:
+				getLeakages().clear();
+				return;
+			case GapwrightPackage.DESIGN__CONNECTIONS:
+				getConnections().clear();
+				return;
+			case GapwrightPackage.DESIGN__TOLERANCES:
+				getTolerances().clear();
+				return;
 		}
 		super.eUnset(featureID);
 	}
@@ -515,6 +623,12 @@ public class DesignImpl extends MinimalEObjectImpl.Container implements Design {
 				return operatingPoints != null && !operatingPoints.isEmpty();
 			case GapwrightPackage.DESIGN__LIMITS:
 				return limits != null;
+			case GapwrightPackage.DESIGN__LEAKAGES:
+				return leakages != null && !leakages.isEmpty();
+			case GapwrightPackage.DESIGN__CONNECTIONS:
+				return connections != null && !connections.isEmpty();
+			case GapwrightPackage.DESIGN__TOLERANCES:
+				return tolerances != null && !tolerances.isEmpty();
 		}
 		return super.eIsSet(featureID);
 	}

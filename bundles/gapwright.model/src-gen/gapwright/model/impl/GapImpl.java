@@ -4,6 +4,7 @@ package gapwright.model.impl;
 
 import gapwright.model.Fringing;
 import gapwright.model.Gap;
+import gapwright.model.GapPlace;
 import gapwright.model.GapwrightPackage;
 
 import gapwright.model.quantity.Quantity;
@@ -27,6 +28,7 @@ import org.eclipse.emf.ecore.impl.ENotificationImpl;
  *   <li>{@link gapwright.model.impl.GapImpl#getFringing <em>Fringing</em>}</li>
  *   <li>{@link gapwright.model.impl.GapImpl#getWindowHeight <em>Window Height</em>}</li>
  *   <li>{@link gapwright.model.impl.GapImpl#getPosition <em>Position</em>}</li>
+ *   <li>{@link gapwright.model.impl.GapImpl#getPlace <em>Place</em>}</li>
  * </ul>
  *
  * @generated
@@ -131,6 +133,26 @@ public class GapImpl extends ElementImpl implements Gap {
 	 * @ordered
 	 */
 	protected double position = POSITION_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getPlace() <em>Place</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getPlace()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final GapPlace PLACE_EDEFAULT = GapPlace.WITHIN_LEG;
+
+	/**
+	 * The cached value of the '{@link #getPlace() <em>Place</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getPlace()
+	 * @generated
+	 * @ordered
+	 */
+	protected GapPlace place = PLACE_EDEFAULT;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -272,6 +294,29 @@ public class GapImpl extends ElementImpl implements Gap {
 	 * @generated
 	 */
 	@Override
+	public GapPlace getPlace() {
+		return place;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setPlace(GapPlace newPlace) {
+		GapPlace oldPlace = place;
+		place = newPlace == null ? PLACE_EDEFAULT : newPlace;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, GapwrightPackage.GAP__PLACE, oldPlace, place));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public Object eGet(int featureID, boolean resolve, boolean coreType) {
 		switch (featureID) {
 			case GapwrightPackage.GAP__LENGTH:
@@ -284,6 +329,8 @@ public class GapImpl extends ElementImpl implements Gap {
 				return getWindowHeight();
 			case GapwrightPackage.GAP__POSITION:
 				return getPosition();
+			case GapwrightPackage.GAP__PLACE:
+				return getPlace();
 		}
 		return super.eGet(featureID, resolve, coreType);
 	}
@@ -310,6 +357,9 @@ public class GapImpl extends ElementImpl implements Gap {
 				return;
 			case GapwrightPackage.GAP__POSITION:
 				setPosition((Double)newValue);
+				return;
+			case GapwrightPackage.GAP__PLACE:
+				setPlace((GapPlace)newValue);
 				return;
 		}
 		super.eSet(featureID, newValue);
@@ -338,6 +388,9 @@ public class GapImpl extends ElementImpl implements Gap {
 			case GapwrightPackage.GAP__POSITION:
 				setPosition(POSITION_EDEFAULT);
 				return;
+			case GapwrightPackage.GAP__PLACE:
+				setPlace(PLACE_EDEFAULT);
+				return;
 		}
 		super.eUnset(featureID);
 	}
@@ -360,6 +413,8 @@ public class GapImpl extends ElementImpl implements Gap {
 				return WINDOW_HEIGHT_EDEFAULT == null ? windowHeight != null : !WINDOW_HEIGHT_EDEFAULT.equals(windowHeight);
 			case GapwrightPackage.GAP__POSITION:
 				return position != POSITION_EDEFAULT;
+			case GapwrightPackage.GAP__PLACE:
+				return place != PLACE_EDEFAULT;
 		}
 		return super.eIsSet(featureID);
 	}
@@ -384,6 +439,8 @@ public class GapImpl extends ElementImpl implements Gap {
 		result.append(windowHeight);
 		result.append(", position: ");
 		result.append(position);
+		result.append(", place: ");
+		result.append(place);
 		result.append(')');
 		return result.toString();
 	}

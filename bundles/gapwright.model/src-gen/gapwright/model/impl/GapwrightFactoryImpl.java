@@ -76,11 +76,17 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 			case GapwrightPackage.CURVE_POINT: return createCurvePoint();
 			case GapwrightPackage.ROLL_OFF_CURVE: return createRollOffCurve();
 			case GapwrightPackage.SATURATION: return createSaturation();
+			case GapwrightPackage.CURVE_AT_TEMPERATURE: return createCurveAtTemperature();
+			case GapwrightPackage.INITIAL_PERMEABILITY: return createInitialPermeability();
 			case GapwrightPackage.STEINMETZ_LOSS: return createSteinmetzLoss();
 			case GapwrightPackage.OPERATING_POINT: return createOperatingPoint();
 			case GapwrightPackage.CURRENT_DRIVE: return createCurrentDrive();
 			case GapwrightPackage.VOLTAGE_DRIVE: return createVoltageDrive();
 			case GapwrightPackage.LIMITS: return createLimits();
+			case GapwrightPackage.WINDING_LEAKAGE: return createWindingLeakage();
+			case GapwrightPackage.WINDING_CONNECTION: return createWindingConnection();
+			case GapwrightPackage.CONNECTED_WINDING: return createConnectedWinding();
+			case GapwrightPackage.TOLERANCE: return createTolerance();
 			default:
 				throw new IllegalArgumentException("The class '" + eClass.getName() + "' is not a valid classifier");
 		}
@@ -98,6 +104,20 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 				return createSectionShapeFromString(eDataType, initialValue);
 			case GapwrightPackage.FRINGING:
 				return createFringingFromString(eDataType, initialValue);
+			case GapwrightPackage.GAP_PLACE:
+				return createGapPlaceFromString(eDataType, initialValue);
+			case GapwrightPackage.CURVE_SCALING:
+				return createCurveScalingFromString(eDataType, initialValue);
+			case GapwrightPackage.VOLTAGE_WAVEFORM:
+				return createVoltageWaveformFromString(eDataType, initialValue);
+			case GapwrightPackage.WINDING_ARRANGEMENT:
+				return createWindingArrangementFromString(eDataType, initialValue);
+			case GapwrightPackage.CONNECTION_KIND:
+				return createConnectionKindFromString(eDataType, initialValue);
+			case GapwrightPackage.TOLERANCED_FEATURE:
+				return createTolerancedFeatureFromString(eDataType, initialValue);
+			case GapwrightPackage.DISTRIBUTION:
+				return createDistributionFromString(eDataType, initialValue);
 			case GapwrightPackage.LENGTH:
 				return createLengthFromString(eDataType, initialValue);
 			case GapwrightPackage.AREA:
@@ -124,6 +144,8 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 				return createDensityFromString(eDataType, initialValue);
 			case GapwrightPackage.WIRE:
 				return createWireFromString(eDataType, initialValue);
+			case GapwrightPackage.DEVIATION:
+				return createDeviationFromString(eDataType, initialValue);
 			default:
 				throw new IllegalArgumentException("The datatype '" + eDataType.getName() + "' is not a valid classifier");
 		}
@@ -141,6 +163,20 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 				return convertSectionShapeToString(eDataType, instanceValue);
 			case GapwrightPackage.FRINGING:
 				return convertFringingToString(eDataType, instanceValue);
+			case GapwrightPackage.GAP_PLACE:
+				return convertGapPlaceToString(eDataType, instanceValue);
+			case GapwrightPackage.CURVE_SCALING:
+				return convertCurveScalingToString(eDataType, instanceValue);
+			case GapwrightPackage.VOLTAGE_WAVEFORM:
+				return convertVoltageWaveformToString(eDataType, instanceValue);
+			case GapwrightPackage.WINDING_ARRANGEMENT:
+				return convertWindingArrangementToString(eDataType, instanceValue);
+			case GapwrightPackage.CONNECTION_KIND:
+				return convertConnectionKindToString(eDataType, instanceValue);
+			case GapwrightPackage.TOLERANCED_FEATURE:
+				return convertTolerancedFeatureToString(eDataType, instanceValue);
+			case GapwrightPackage.DISTRIBUTION:
+				return convertDistributionToString(eDataType, instanceValue);
 			case GapwrightPackage.LENGTH:
 				return convertLengthToString(eDataType, instanceValue);
 			case GapwrightPackage.AREA:
@@ -167,6 +203,8 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 				return convertDensityToString(eDataType, instanceValue);
 			case GapwrightPackage.WIRE:
 				return convertWireToString(eDataType, instanceValue);
+			case GapwrightPackage.DEVIATION:
+				return convertDeviationToString(eDataType, instanceValue);
 			default:
 				throw new IllegalArgumentException("The datatype '" + eDataType.getName() + "' is not a valid classifier");
 		}
@@ -354,6 +392,28 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 	 * @generated
 	 */
 	@Override
+	public CurveAtTemperature createCurveAtTemperature() {
+		CurveAtTemperatureImpl curveAtTemperature = new CurveAtTemperatureImpl();
+		return curveAtTemperature;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public InitialPermeability createInitialPermeability() {
+		InitialPermeabilityImpl initialPermeability = new InitialPermeabilityImpl();
+		return initialPermeability;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public SteinmetzLoss createSteinmetzLoss() {
 		SteinmetzLossImpl steinmetzLoss = new SteinmetzLossImpl();
 		return steinmetzLoss;
@@ -408,6 +468,50 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 	 * <!-- end-user-doc -->
 	 * @generated
 	 */
+	@Override
+	public WindingLeakage createWindingLeakage() {
+		WindingLeakageImpl windingLeakage = new WindingLeakageImpl();
+		return windingLeakage;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public WindingConnection createWindingConnection() {
+		WindingConnectionImpl windingConnection = new WindingConnectionImpl();
+		return windingConnection;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public ConnectedWinding createConnectedWinding() {
+		ConnectedWindingImpl connectedWinding = new ConnectedWindingImpl();
+		return connectedWinding;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Tolerance createTolerance() {
+		ToleranceImpl tolerance = new ToleranceImpl();
+		return tolerance;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
 	public SectionShape createSectionShapeFromString(EDataType eDataType, String initialValue) {
 		SectionShape result = SectionShape.get(initialValue);
 		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
@@ -440,6 +544,146 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 	 * @generated
 	 */
 	public String convertFringingToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public GapPlace createGapPlaceFromString(EDataType eDataType, String initialValue) {
+		GapPlace result = GapPlace.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertGapPlaceToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public CurveScaling createCurveScalingFromString(EDataType eDataType, String initialValue) {
+		CurveScaling result = CurveScaling.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertCurveScalingToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public VoltageWaveform createVoltageWaveformFromString(EDataType eDataType, String initialValue) {
+		VoltageWaveform result = VoltageWaveform.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertVoltageWaveformToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public WindingArrangement createWindingArrangementFromString(EDataType eDataType, String initialValue) {
+		WindingArrangement result = WindingArrangement.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertWindingArrangementToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public ConnectionKind createConnectionKindFromString(EDataType eDataType, String initialValue) {
+		ConnectionKind result = ConnectionKind.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertConnectionKindToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public TolerancedFeature createTolerancedFeatureFromString(EDataType eDataType, String initialValue) {
+		TolerancedFeature result = TolerancedFeature.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertTolerancedFeatureToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public Distribution createDistributionFromString(EDataType eDataType, String initialValue) {
+		Distribution result = Distribution.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertDistributionToString(EDataType eDataType, Object instanceValue) {
 		return instanceValue == null ? null : instanceValue.toString();
 	}
 
@@ -909,6 +1153,42 @@ public class GapwrightFactoryImpl extends EFactoryImpl implements GapwrightFacto
 	 */
 	public String convertWireToString(EDataType eDataType, Object instanceValue) {
 		return convertWire((Quantity)instanceValue);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public Quantity createDeviation(final String it) {
+		return it == null ? null : Quantity.parse(it, Dimension.DEVIATION);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public Quantity createDeviationFromString(EDataType eDataType, String initialValue) {
+		return createDeviation(initialValue);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertDeviation(final Quantity it) {
+		return it == null ? null : it.text();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertDeviationToString(EDataType eDataType, Object instanceValue) {
+		return convertDeviation((Quantity)instanceValue);
 	}
 
 	/**

@@ -5,16 +5,23 @@ package gapwright.model.impl;
 import gapwright.model.AirPath;
 import gapwright.model.ArctanCurve;
 import gapwright.model.Coil;
+import gapwright.model.ConnectedWinding;
+import gapwright.model.ConnectionKind;
 import gapwright.model.CurrentDrive;
 import gapwright.model.Curve;
+import gapwright.model.CurveAtTemperature;
 import gapwright.model.CurvePoint;
+import gapwright.model.CurveScaling;
 import gapwright.model.Design;
+import gapwright.model.Distribution;
 import gapwright.model.Drive;
 import gapwright.model.Element;
 import gapwright.model.Fringing;
 import gapwright.model.Gap;
+import gapwright.model.GapPlace;
 import gapwright.model.GapwrightFactory;
 import gapwright.model.GapwrightPackage;
+import gapwright.model.InitialPermeability;
 import gapwright.model.Joint;
 import gapwright.model.KneeCurve;
 import gapwright.model.Leg;
@@ -28,8 +35,14 @@ import gapwright.model.Saturation;
 import gapwright.model.SectionShape;
 import gapwright.model.SteinmetzLoss;
 import gapwright.model.TableCurve;
+import gapwright.model.Tolerance;
+import gapwright.model.TolerancedFeature;
 import gapwright.model.VoltageDrive;
+import gapwright.model.VoltageWaveform;
 import gapwright.model.Winding;
+import gapwright.model.WindingArrangement;
+import gapwright.model.WindingConnection;
+import gapwright.model.WindingLeakage;
 
 import gapwright.model.quantity.Quantity;
 
@@ -180,6 +193,20 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * <!-- end-user-doc -->
 	 * @generated
 	 */
+	private EClass curveAtTemperatureEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass initialPermeabilityEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
 	private EClass steinmetzLossEClass = null;
 
 	/**
@@ -222,6 +249,34 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * <!-- end-user-doc -->
 	 * @generated
 	 */
+	private EClass windingLeakageEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass windingConnectionEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass connectedWindingEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass toleranceEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
 	private EEnum sectionShapeEEnum = null;
 
 	/**
@@ -230,6 +285,55 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * @generated
 	 */
 	private EEnum fringingEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum gapPlaceEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum curveScalingEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum voltageWaveformEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum windingArrangementEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum connectionKindEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum tolerancedFeatureEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum distributionEEnum = null;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -321,6 +425,13 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * @generated
 	 */
 	private EDataType wireEDataType = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EDataType deviationEDataType = null;
 
 	/**
 	 * Creates an instance of the model <b>Package</b>, registered with
@@ -480,6 +591,36 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	@Override
 	public EReference getDesign_Limits() {
 		return (EReference)designEClass.getEStructuralFeatures().get(8);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getDesign_Leakages() {
+		return (EReference)designEClass.getEStructuralFeatures().get(9);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getDesign_Connections() {
+		return (EReference)designEClass.getEStructuralFeatures().get(10);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getDesign_Tolerances() {
+		return (EReference)designEClass.getEStructuralFeatures().get(11);
 	}
 
 	/**
@@ -738,6 +879,16 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * @generated
 	 */
 	@Override
+	public EAttribute getGap_Place() {
+		return (EAttribute)gapEClass.getEStructuralFeatures().get(5);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EClass getMagnet() {
 		return magnetEClass;
 	}
@@ -850,6 +1001,16 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	@Override
 	public EAttribute getAirPath_Length() {
 		return (EAttribute)airPathEClass.getEStructuralFeatures().get(4);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getAirPath_Leakage() {
+		return (EAttribute)airPathEClass.getEStructuralFeatures().get(5);
 	}
 
 	/**
@@ -1000,6 +1161,56 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	@Override
 	public EAttribute getMaterial_Source() {
 		return (EAttribute)materialEClass.getEStructuralFeatures().get(4);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getMaterial_CurveTemperature() {
+		return (EAttribute)materialEClass.getEStructuralFeatures().get(5);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getMaterial_CurveScaling() {
+		return (EAttribute)materialEClass.getEStructuralFeatures().get(6);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getMaterial_OtherCurves() {
+		return (EReference)materialEClass.getEStructuralFeatures().get(7);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getMaterial_Permeabilities() {
+		return (EReference)materialEClass.getEStructuralFeatures().get(8);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getMaterial_CurieTemperature() {
+		return (EAttribute)materialEClass.getEStructuralFeatures().get(9);
 	}
 
 	/**
@@ -1218,6 +1429,66 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * @generated
 	 */
 	@Override
+	public EClass getCurveAtTemperature() {
+		return curveAtTemperatureEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCurveAtTemperature_Temperature() {
+		return (EAttribute)curveAtTemperatureEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getCurveAtTemperature_Curve() {
+		return (EReference)curveAtTemperatureEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getInitialPermeability() {
+		return initialPermeabilityEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getInitialPermeability_Temperature() {
+		return (EAttribute)initialPermeabilityEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getInitialPermeability_RelativePermeability() {
+		return (EAttribute)initialPermeabilityEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EClass getSteinmetzLoss() {
 		return steinmetzLossEClass;
 	}
@@ -1418,6 +1689,16 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * @generated
 	 */
 	@Override
+	public EAttribute getVoltageDrive_Waveform() {
+		return (EAttribute)voltageDriveEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EClass getLimits() {
 		return limitsEClass;
 	}
@@ -1438,6 +1719,216 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * @generated
 	 */
 	@Override
+	public EClass getWindingLeakage() {
+		return windingLeakageEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getWindingLeakage_First() {
+		return (EReference)windingLeakageEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getWindingLeakage_Second() {
+		return (EReference)windingLeakageEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingLeakage_Arrangement() {
+		return (EAttribute)windingLeakageEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingLeakage_FirstBuild() {
+		return (EAttribute)windingLeakageEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingLeakage_SecondBuild() {
+		return (EAttribute)windingLeakageEClass.getEStructuralFeatures().get(4);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingLeakage_Separation() {
+		return (EAttribute)windingLeakageEClass.getEStructuralFeatures().get(5);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingLeakage_Height() {
+		return (EAttribute)windingLeakageEClass.getEStructuralFeatures().get(6);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingLeakage_MeanTurn() {
+		return (EAttribute)windingLeakageEClass.getEStructuralFeatures().get(7);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingLeakage_Interfaces() {
+		return (EAttribute)windingLeakageEClass.getEStructuralFeatures().get(8);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getWindingConnection() {
+		return windingConnectionEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getWindingConnection_Kind() {
+		return (EAttribute)windingConnectionEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getWindingConnection_Members() {
+		return (EReference)windingConnectionEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getConnectedWinding() {
+		return connectedWindingEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getConnectedWinding_Winding() {
+		return (EReference)connectedWindingEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getConnectedWinding_Reversed() {
+		return (EAttribute)connectedWindingEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getTolerance() {
+		return toleranceEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getTolerance_Targets() {
+		return (EReference)toleranceEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getTolerance_Feature() {
+		return (EAttribute)toleranceEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getTolerance_Deviation() {
+		return (EAttribute)toleranceEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getTolerance_Distribution() {
+		return (EAttribute)toleranceEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EEnum getSectionShape() {
 		return sectionShapeEEnum;
 	}
@@ -1450,6 +1941,76 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	@Override
 	public EEnum getFringing() {
 		return fringingEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EEnum getGapPlace() {
+		return gapPlaceEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EEnum getCurveScaling() {
+		return curveScalingEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EEnum getVoltageWaveform() {
+		return voltageWaveformEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EEnum getWindingArrangement() {
+		return windingArrangementEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EEnum getConnectionKind() {
+		return connectionKindEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EEnum getTolerancedFeature() {
+		return tolerancedFeatureEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EEnum getDistribution() {
+		return distributionEEnum;
 	}
 
 	/**
@@ -1588,6 +2149,16 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 	 * @generated
 	 */
 	@Override
+	public EDataType getDeviation() {
+		return deviationEDataType;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public GapwrightFactory getGapwrightFactory() {
 		return (GapwrightFactory)getEFactoryInstance();
 	}
@@ -1621,6 +2192,9 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		createEReference(designEClass, DESIGN__WINDINGS);
 		createEReference(designEClass, DESIGN__OPERATING_POINTS);
 		createEReference(designEClass, DESIGN__LIMITS);
+		createEReference(designEClass, DESIGN__LEAKAGES);
+		createEReference(designEClass, DESIGN__CONNECTIONS);
+		createEReference(designEClass, DESIGN__TOLERANCES);
 
 		elementEClass = createEClass(ELEMENT);
 		createEAttribute(elementEClass, ELEMENT__ID);
@@ -1650,6 +2224,7 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		createEAttribute(gapEClass, GAP__FRINGING);
 		createEAttribute(gapEClass, GAP__WINDOW_HEIGHT);
 		createEAttribute(gapEClass, GAP__POSITION);
+		createEAttribute(gapEClass, GAP__PLACE);
 
 		magnetEClass = createEClass(MAGNET);
 		createEAttribute(magnetEClass, MAGNET__LENGTH);
@@ -1664,6 +2239,7 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		createEAttribute(airPathEClass, AIR_PATH__PERMEANCE);
 		createEAttribute(airPathEClass, AIR_PATH__AREA);
 		createEAttribute(airPathEClass, AIR_PATH__LENGTH);
+		createEAttribute(airPathEClass, AIR_PATH__LEAKAGE);
 
 		windingEClass = createEClass(WINDING);
 		createEReference(windingEClass, WINDING__COILS);
@@ -1682,6 +2258,11 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		createEReference(materialEClass, MATERIAL__LOSS);
 		createEAttribute(materialEClass, MATERIAL__DENSITY);
 		createEAttribute(materialEClass, MATERIAL__SOURCE);
+		createEAttribute(materialEClass, MATERIAL__CURVE_TEMPERATURE);
+		createEAttribute(materialEClass, MATERIAL__CURVE_SCALING);
+		createEReference(materialEClass, MATERIAL__OTHER_CURVES);
+		createEReference(materialEClass, MATERIAL__PERMEABILITIES);
+		createEAttribute(materialEClass, MATERIAL__CURIE_TEMPERATURE);
 
 		curveEClass = createEClass(CURVE);
 
@@ -1712,6 +2293,14 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		createEAttribute(saturationEClass, SATURATION__TEMPERATURE);
 		createEAttribute(saturationEClass, SATURATION__FLUX_DENSITY);
 
+		curveAtTemperatureEClass = createEClass(CURVE_AT_TEMPERATURE);
+		createEAttribute(curveAtTemperatureEClass, CURVE_AT_TEMPERATURE__TEMPERATURE);
+		createEReference(curveAtTemperatureEClass, CURVE_AT_TEMPERATURE__CURVE);
+
+		initialPermeabilityEClass = createEClass(INITIAL_PERMEABILITY);
+		createEAttribute(initialPermeabilityEClass, INITIAL_PERMEABILITY__TEMPERATURE);
+		createEAttribute(initialPermeabilityEClass, INITIAL_PERMEABILITY__RELATIVE_PERMEABILITY);
+
 		steinmetzLossEClass = createEClass(STEINMETZ_LOSS);
 		createEAttribute(steinmetzLossEClass, STEINMETZ_LOSS__COEFFICIENT);
 		createEAttribute(steinmetzLossEClass, STEINMETZ_LOSS__FREQUENCY_EXPONENT);
@@ -1736,13 +2325,46 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		createEAttribute(voltageDriveEClass, VOLTAGE_DRIVE__VOLTAGE);
 		createEAttribute(voltageDriveEClass, VOLTAGE_DRIVE__ON_TIME);
 		createEAttribute(voltageDriveEClass, VOLTAGE_DRIVE__BIAS);
+		createEAttribute(voltageDriveEClass, VOLTAGE_DRIVE__WAVEFORM);
 
 		limitsEClass = createEClass(LIMITS);
 		createEAttribute(limitsEClass, LIMITS__NEAR_FRACTION);
 
+		windingLeakageEClass = createEClass(WINDING_LEAKAGE);
+		createEReference(windingLeakageEClass, WINDING_LEAKAGE__FIRST);
+		createEReference(windingLeakageEClass, WINDING_LEAKAGE__SECOND);
+		createEAttribute(windingLeakageEClass, WINDING_LEAKAGE__ARRANGEMENT);
+		createEAttribute(windingLeakageEClass, WINDING_LEAKAGE__FIRST_BUILD);
+		createEAttribute(windingLeakageEClass, WINDING_LEAKAGE__SECOND_BUILD);
+		createEAttribute(windingLeakageEClass, WINDING_LEAKAGE__SEPARATION);
+		createEAttribute(windingLeakageEClass, WINDING_LEAKAGE__HEIGHT);
+		createEAttribute(windingLeakageEClass, WINDING_LEAKAGE__MEAN_TURN);
+		createEAttribute(windingLeakageEClass, WINDING_LEAKAGE__INTERFACES);
+
+		windingConnectionEClass = createEClass(WINDING_CONNECTION);
+		createEAttribute(windingConnectionEClass, WINDING_CONNECTION__KIND);
+		createEReference(windingConnectionEClass, WINDING_CONNECTION__MEMBERS);
+
+		connectedWindingEClass = createEClass(CONNECTED_WINDING);
+		createEReference(connectedWindingEClass, CONNECTED_WINDING__WINDING);
+		createEAttribute(connectedWindingEClass, CONNECTED_WINDING__REVERSED);
+
+		toleranceEClass = createEClass(TOLERANCE);
+		createEReference(toleranceEClass, TOLERANCE__TARGETS);
+		createEAttribute(toleranceEClass, TOLERANCE__FEATURE);
+		createEAttribute(toleranceEClass, TOLERANCE__DEVIATION);
+		createEAttribute(toleranceEClass, TOLERANCE__DISTRIBUTION);
+
 		// Create enums
 		sectionShapeEEnum = createEEnum(SECTION_SHAPE);
 		fringingEEnum = createEEnum(FRINGING);
+		gapPlaceEEnum = createEEnum(GAP_PLACE);
+		curveScalingEEnum = createEEnum(CURVE_SCALING);
+		voltageWaveformEEnum = createEEnum(VOLTAGE_WAVEFORM);
+		windingArrangementEEnum = createEEnum(WINDING_ARRANGEMENT);
+		connectionKindEEnum = createEEnum(CONNECTION_KIND);
+		tolerancedFeatureEEnum = createEEnum(TOLERANCED_FEATURE);
+		distributionEEnum = createEEnum(DISTRIBUTION);
 
 		// Create data types
 		lengthEDataType = createEDataType(LENGTH);
@@ -1758,6 +2380,7 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		permeanceEDataType = createEDataType(PERMEANCE);
 		densityEDataType = createEDataType(DENSITY);
 		wireEDataType = createEDataType(WIRE);
+		deviationEDataType = createEDataType(DEVIATION);
 	}
 
 	/**
@@ -1805,6 +2428,9 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		driveEClass.getESuperTypes().add(this.getElement());
 		currentDriveEClass.getESuperTypes().add(this.getDrive());
 		voltageDriveEClass.getESuperTypes().add(this.getDrive());
+		windingLeakageEClass.getESuperTypes().add(this.getElement());
+		windingConnectionEClass.getESuperTypes().add(this.getElement());
+		toleranceEClass.getESuperTypes().add(this.getElement());
 
 		// Initialize classes and features; add operations and parameters
 		initEClass(designEClass, Design.class, "Design", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
@@ -1817,6 +2443,9 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		initEReference(getDesign_Windings(), this.getWinding(), null, "windings", null, 0, -1, Design.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEReference(getDesign_OperatingPoints(), this.getOperatingPoint(), null, "operatingPoints", null, 0, -1, Design.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEReference(getDesign_Limits(), this.getLimits(), null, "limits", null, 0, 1, Design.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getDesign_Leakages(), this.getWindingLeakage(), null, "leakages", null, 0, -1, Design.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getDesign_Connections(), this.getWindingConnection(), null, "connections", null, 0, -1, Design.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getDesign_Tolerances(), this.getTolerance(), null, "tolerances", null, 0, -1, Design.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		initEClass(elementEClass, Element.class, "Element", IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getElement_Id(), ecorePackage.getEString(), "id", null, 1, 1, Element.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
@@ -1846,6 +2475,7 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		initEAttribute(getGap_Fringing(), this.getFringing(), "fringing", null, 0, 1, Gap.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getGap_WindowHeight(), this.getLength(), "windowHeight", null, 0, 1, Gap.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getGap_Position(), ecorePackage.getEDouble(), "position", "0.5", 0, 1, Gap.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getGap_Place(), this.getGapPlace(), "place", null, 0, 1, Gap.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		initEClass(magnetEClass, Magnet.class, "Magnet", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getMagnet_Length(), this.getLength(), "length", null, 1, 1, Magnet.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
@@ -1860,6 +2490,7 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		initEAttribute(getAirPath_Permeance(), this.getPermeance(), "permeance", null, 0, 1, AirPath.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getAirPath_Area(), this.getArea(), "area", null, 0, 1, AirPath.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getAirPath_Length(), this.getLength(), "length", null, 0, 1, AirPath.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getAirPath_Leakage(), ecorePackage.getEBoolean(), "leakage", null, 0, 1, AirPath.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		initEClass(windingEClass, Winding.class, "Winding", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEReference(getWinding_Coils(), this.getCoil(), null, "coils", null, 0, -1, Winding.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
@@ -1878,6 +2509,11 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		initEReference(getMaterial_Loss(), this.getSteinmetzLoss(), null, "loss", null, 0, 1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getMaterial_Density(), this.getDensity(), "density", null, 0, 1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getMaterial_Source(), ecorePackage.getEString(), "source", null, 0, 1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getMaterial_CurveTemperature(), this.getTemperature(), "curveTemperature", null, 0, 1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getMaterial_CurveScaling(), this.getCurveScaling(), "curveScaling", null, 0, 1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getMaterial_OtherCurves(), this.getCurveAtTemperature(), null, "otherCurves", null, 0, -1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getMaterial_Permeabilities(), this.getInitialPermeability(), null, "permeabilities", null, 0, -1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getMaterial_CurieTemperature(), this.getTemperature(), "curieTemperature", null, 0, 1, Material.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		initEClass(curveEClass, Curve.class, "Curve", IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 
@@ -1908,6 +2544,14 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		initEAttribute(getSaturation_Temperature(), this.getTemperature(), "temperature", null, 1, 1, Saturation.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getSaturation_FluxDensity(), this.getFluxDensity(), "fluxDensity", null, 1, 1, Saturation.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
+		initEClass(curveAtTemperatureEClass, CurveAtTemperature.class, "CurveAtTemperature", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getCurveAtTemperature_Temperature(), this.getTemperature(), "temperature", null, 1, 1, CurveAtTemperature.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getCurveAtTemperature_Curve(), this.getCurve(), null, "curve", null, 1, 1, CurveAtTemperature.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(initialPermeabilityEClass, InitialPermeability.class, "InitialPermeability", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getInitialPermeability_Temperature(), this.getTemperature(), "temperature", null, 1, 1, InitialPermeability.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getInitialPermeability_RelativePermeability(), ecorePackage.getEDouble(), "relativePermeability", null, 1, 1, InitialPermeability.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
 		initEClass(steinmetzLossEClass, SteinmetzLoss.class, "SteinmetzLoss", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getSteinmetzLoss_Coefficient(), ecorePackage.getEDouble(), "coefficient", null, 1, 1, SteinmetzLoss.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getSteinmetzLoss_FrequencyExponent(), ecorePackage.getEDouble(), "frequencyExponent", null, 1, 1, SteinmetzLoss.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
@@ -1932,9 +2576,35 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		initEAttribute(getVoltageDrive_Voltage(), this.getVoltage(), "voltage", null, 1, 1, VoltageDrive.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getVoltageDrive_OnTime(), this.getTime(), "onTime", null, 1, 1, VoltageDrive.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getVoltageDrive_Bias(), this.getCurrent(), "bias", "0 A", 0, 1, VoltageDrive.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getVoltageDrive_Waveform(), this.getVoltageWaveform(), "waveform", null, 0, 1, VoltageDrive.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		initEClass(limitsEClass, Limits.class, "Limits", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getLimits_NearFraction(), ecorePackage.getEDouble(), "nearFraction", "0.8", 0, 1, Limits.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(windingLeakageEClass, WindingLeakage.class, "WindingLeakage", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEReference(getWindingLeakage_First(), this.getWinding(), null, "first", null, 1, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getWindingLeakage_Second(), this.getWinding(), null, "second", null, 1, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getWindingLeakage_Arrangement(), this.getWindingArrangement(), "arrangement", null, 0, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getWindingLeakage_FirstBuild(), this.getLength(), "firstBuild", null, 1, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getWindingLeakage_SecondBuild(), this.getLength(), "secondBuild", null, 1, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getWindingLeakage_Separation(), this.getLength(), "separation", null, 1, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getWindingLeakage_Height(), this.getLength(), "height", null, 1, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getWindingLeakage_MeanTurn(), this.getLength(), "meanTurn", null, 1, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getWindingLeakage_Interfaces(), ecorePackage.getEInt(), "interfaces", "1", 0, 1, WindingLeakage.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(windingConnectionEClass, WindingConnection.class, "WindingConnection", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getWindingConnection_Kind(), this.getConnectionKind(), "kind", null, 0, 1, WindingConnection.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEReference(getWindingConnection_Members(), this.getConnectedWinding(), null, "members", null, 0, -1, WindingConnection.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(connectedWindingEClass, ConnectedWinding.class, "ConnectedWinding", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEReference(getConnectedWinding_Winding(), this.getWinding(), null, "winding", null, 1, 1, ConnectedWinding.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getConnectedWinding_Reversed(), ecorePackage.getEBoolean(), "reversed", null, 0, 1, ConnectedWinding.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(toleranceEClass, Tolerance.class, "Tolerance", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEReference(getTolerance_Targets(), this.getElement(), null, "targets", null, 0, -1, Tolerance.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getTolerance_Feature(), this.getTolerancedFeature(), "feature", null, 0, 1, Tolerance.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getTolerance_Deviation(), this.getDeviation(), "deviation", null, 1, 1, Tolerance.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getTolerance_Distribution(), this.getDistribution(), "distribution", null, 0, 1, Tolerance.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		// Initialize enums and add enum literals
 		initEEnum(sectionShapeEEnum, SectionShape.class, "SectionShape");
@@ -1947,6 +2617,46 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		addEEnumLiteral(fringingEEnum, Fringing.WIDENED);
 		addEEnumLiteral(fringingEEnum, Fringing.LOGARITHMIC);
 		addEEnumLiteral(fringingEEnum, Fringing.CONFORMAL);
+
+		initEEnum(gapPlaceEEnum, GapPlace.class, "GapPlace");
+		addEEnumLiteral(gapPlaceEEnum, GapPlace.WITHIN_LEG);
+		addEEnumLiteral(gapPlaceEEnum, GapPlace.AGAINST_YOKE);
+		addEEnumLiteral(gapPlaceEEnum, GapPlace.BETWEEN_POLES);
+
+		initEEnum(curveScalingEEnum, CurveScaling.class, "CurveScaling");
+		addEEnumLiteral(curveScalingEEnum, CurveScaling.FIXED);
+		addEEnumLiteral(curveScalingEEnum, CurveScaling.WITH_SATURATION);
+
+		initEEnum(voltageWaveformEEnum, VoltageWaveform.class, "VoltageWaveform");
+		addEEnumLiteral(voltageWaveformEEnum, VoltageWaveform.RECTANGULAR);
+		addEEnumLiteral(voltageWaveformEEnum, VoltageWaveform.TRIANGULAR);
+		addEEnumLiteral(voltageWaveformEEnum, VoltageWaveform.SINUSOIDAL);
+
+		initEEnum(windingArrangementEEnum, WindingArrangement.class, "WindingArrangement");
+		addEEnumLiteral(windingArrangementEEnum, WindingArrangement.CONCENTRIC);
+		addEEnumLiteral(windingArrangementEEnum, WindingArrangement.SIDE_BY_SIDE);
+
+		initEEnum(connectionKindEEnum, ConnectionKind.class, "ConnectionKind");
+		addEEnumLiteral(connectionKindEEnum, ConnectionKind.SERIES);
+		addEEnumLiteral(connectionKindEEnum, ConnectionKind.PARALLEL);
+
+		initEEnum(tolerancedFeatureEEnum, TolerancedFeature.class, "TolerancedFeature");
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.GAP_LENGTH);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.WIDTH);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.DEPTH);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.DIAMETER);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.AREA);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.PATH_LENGTH);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.STACKING_FACTOR);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.MAGNET_LENGTH);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.REMANENCE);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.PERMEABILITY);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.SATURATION);
+		addEEnumLiteral(tolerancedFeatureEEnum, TolerancedFeature.CURRENT);
+
+		initEEnum(distributionEEnum, Distribution.class, "Distribution");
+		addEEnumLiteral(distributionEEnum, Distribution.UNIFORM);
+		addEEnumLiteral(distributionEEnum, Distribution.NORMAL);
 
 		// Initialize data types
 		initEDataType(lengthEDataType, Quantity.class, "Length", IS_SERIALIZABLE, !IS_GENERATED_INSTANCE_CLASS);
@@ -1962,6 +2672,7 @@ public class GapwrightPackageImpl extends EPackageImpl implements GapwrightPacka
 		initEDataType(permeanceEDataType, Quantity.class, "Permeance", IS_SERIALIZABLE, !IS_GENERATED_INSTANCE_CLASS);
 		initEDataType(densityEDataType, Quantity.class, "Density", IS_SERIALIZABLE, !IS_GENERATED_INSTANCE_CLASS);
 		initEDataType(wireEDataType, Quantity.class, "Wire", IS_SERIALIZABLE, !IS_GENERATED_INSTANCE_CLASS);
+		initEDataType(deviationEDataType, Quantity.class, "Deviation", IS_SERIALIZABLE, !IS_GENERATED_INSTANCE_CLASS);
 
 		// Create resource
 		createResource(eNS_URI);

@@ -3,7 +3,10 @@
 package gapwright.model.impl;
 
 import gapwright.model.Curve;
+import gapwright.model.CurveAtTemperature;
+import gapwright.model.CurveScaling;
 import gapwright.model.GapwrightPackage;
+import gapwright.model.InitialPermeability;
 import gapwright.model.Material;
 import gapwright.model.Saturation;
 import gapwright.model.SteinmetzLoss;
@@ -38,6 +41,11 @@ import org.eclipse.emf.ecore.util.InternalEList;
  *   <li>{@link gapwright.model.impl.MaterialImpl#getLoss <em>Loss</em>}</li>
  *   <li>{@link gapwright.model.impl.MaterialImpl#getDensity <em>Density</em>}</li>
  *   <li>{@link gapwright.model.impl.MaterialImpl#getSource <em>Source</em>}</li>
+ *   <li>{@link gapwright.model.impl.MaterialImpl#getCurveTemperature <em>Curve Temperature</em>}</li>
+ *   <li>{@link gapwright.model.impl.MaterialImpl#getCurveScaling <em>Curve Scaling</em>}</li>
+ *   <li>{@link gapwright.model.impl.MaterialImpl#getOtherCurves <em>Other Curves</em>}</li>
+ *   <li>{@link gapwright.model.impl.MaterialImpl#getPermeabilities <em>Permeabilities</em>}</li>
+ *   <li>{@link gapwright.model.impl.MaterialImpl#getCurieTemperature <em>Curie Temperature</em>}</li>
  * </ul>
  *
  * @generated
@@ -112,6 +120,86 @@ public class MaterialImpl extends ElementImpl implements Material {
 	 * @ordered
 	 */
 	protected String source = SOURCE_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getCurveTemperature() <em>Curve Temperature</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getCurveTemperature()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final Quantity CURVE_TEMPERATURE_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getCurveTemperature() <em>Curve Temperature</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getCurveTemperature()
+	 * @generated
+	 * @ordered
+	 */
+	protected Quantity curveTemperature = CURVE_TEMPERATURE_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getCurveScaling() <em>Curve Scaling</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getCurveScaling()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final CurveScaling CURVE_SCALING_EDEFAULT = CurveScaling.FIXED;
+
+	/**
+	 * The cached value of the '{@link #getCurveScaling() <em>Curve Scaling</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getCurveScaling()
+	 * @generated
+	 * @ordered
+	 */
+	protected CurveScaling curveScaling = CURVE_SCALING_EDEFAULT;
+
+	/**
+	 * The cached value of the '{@link #getOtherCurves() <em>Other Curves</em>}' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getOtherCurves()
+	 * @generated
+	 * @ordered
+	 */
+	protected EList<CurveAtTemperature> otherCurves;
+
+	/**
+	 * The cached value of the '{@link #getPermeabilities() <em>Permeabilities</em>}' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getPermeabilities()
+	 * @generated
+	 * @ordered
+	 */
+	protected EList<InitialPermeability> permeabilities;
+
+	/**
+	 * The default value of the '{@link #getCurieTemperature() <em>Curie Temperature</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getCurieTemperature()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final Quantity CURIE_TEMPERATURE_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getCurieTemperature() <em>Curie Temperature</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getCurieTemperature()
+	 * @generated
+	 * @ordered
+	 */
+	protected Quantity curieTemperature = CURIE_TEMPERATURE_EDEFAULT;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -287,6 +375,101 @@ public class MaterialImpl extends ElementImpl implements Material {
 	 * @generated
 	 */
 	@Override
+	public Quantity getCurveTemperature() {
+		return curveTemperature;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setCurveTemperature(Quantity newCurveTemperature) {
+		Quantity oldCurveTemperature = curveTemperature;
+		curveTemperature = newCurveTemperature;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, GapwrightPackage.MATERIAL__CURVE_TEMPERATURE, oldCurveTemperature, curveTemperature));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public CurveScaling getCurveScaling() {
+		return curveScaling;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setCurveScaling(CurveScaling newCurveScaling) {
+		CurveScaling oldCurveScaling = curveScaling;
+		curveScaling = newCurveScaling == null ? CURVE_SCALING_EDEFAULT : newCurveScaling;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, GapwrightPackage.MATERIAL__CURVE_SCALING, oldCurveScaling, curveScaling));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EList<CurveAtTemperature> getOtherCurves() {
+		if (otherCurves == null) {
+			otherCurves = new EObjectContainmentEList<CurveAtTemperature>(CurveAtTemperature.class, this, GapwrightPackage.MATERIAL__OTHER_CURVES);
+		}
+		return otherCurves;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EList<InitialPermeability> getPermeabilities() {
+		if (permeabilities == null) {
+			permeabilities = new EObjectContainmentEList<InitialPermeability>(InitialPermeability.class, this, GapwrightPackage.MATERIAL__PERMEABILITIES);
+		}
+		return permeabilities;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Quantity getCurieTemperature() {
+		return curieTemperature;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setCurieTemperature(Quantity newCurieTemperature) {
+		Quantity oldCurieTemperature = curieTemperature;
+		curieTemperature = newCurieTemperature;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, GapwrightPackage.MATERIAL__CURIE_TEMPERATURE, oldCurieTemperature, curieTemperature));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public NotificationChain eInverseRemove(InternalEObject otherEnd, int featureID, NotificationChain msgs) {
 		switch (featureID) {
 			case GapwrightPackage.MATERIAL__CURVE:
@@ -295,6 +478,10 @@ public class MaterialImpl extends ElementImpl implements Material {
 				return ((InternalEList<?>)getSaturations()).basicRemove(otherEnd, msgs);
 			case GapwrightPackage.MATERIAL__LOSS:
 				return basicSetLoss(null, msgs);
+			case GapwrightPackage.MATERIAL__OTHER_CURVES:
+				return ((InternalEList<?>)getOtherCurves()).basicRemove(otherEnd, msgs);
+			case GapwrightPackage.MATERIAL__PERMEABILITIES:
+				return ((InternalEList<?>)getPermeabilities()).basicRemove(otherEnd, msgs);
 		}
 		return super.eInverseRemove(otherEnd, featureID, msgs);
 	}
@@ -317,6 +504,16 @@ public class MaterialImpl extends ElementImpl implements Material {
 				return getDensity();
 			case GapwrightPackage.MATERIAL__SOURCE:
 				return getSource();
+			case GapwrightPackage.MATERIAL__CURVE_TEMPERATURE:
+				return getCurveTemperature();
+			case GapwrightPackage.MATERIAL__CURVE_SCALING:
+				return getCurveScaling();
+			case GapwrightPackage.MATERIAL__OTHER_CURVES:
+				return getOtherCurves();
+			case GapwrightPackage.MATERIAL__PERMEABILITIES:
+				return getPermeabilities();
+			case GapwrightPackage.MATERIAL__CURIE_TEMPERATURE:
+				return getCurieTemperature();
 		}
 		return super.eGet(featureID, resolve, coreType);
 	}
@@ -346,6 +543,23 @@ public class MaterialImpl extends ElementImpl implements Material {
 			case GapwrightPackage.MATERIAL__SOURCE:
 				setSource((String)newValue);
 				return;
+			case GapwrightPackage.MATERIAL__CURVE_TEMPERATURE:
+				setCurveTemperature((Quantity)newValue);
+				return;
+			case GapwrightPackage.MATERIAL__CURVE_SCALING:
+				setCurveScaling((CurveScaling)newValue);
+				return;
+			case GapwrightPackage.MATERIAL__OTHER_CURVES:
+				getOtherCurves().clear();
+				getOtherCurves().addAll((Collection<? extends CurveAtTemperature>)newValue);
+				return;
+			case GapwrightPackage.MATERIAL__PERMEABILITIES:
+				getPermeabilities().clear();
+				getPermeabilities().addAll((Collection<? extends InitialPermeability>)newValue);
+				return;
+			case GapwrightPackage.MATERIAL__CURIE_TEMPERATURE:
+				setCurieTemperature((Quantity)newValue);
+				return;
 		}
 		super.eSet(featureID, newValue);
 	}
@@ -373,6 +587,21 @@ public class MaterialImpl extends ElementImpl implements Material {
 			case GapwrightPackage.MATERIAL__SOURCE:
 				setSource(SOURCE_EDEFAULT);
 				return;
+			case GapwrightPackage.MATERIAL__CURVE_TEMPERATURE:
+				setCurveTemperature(CURVE_TEMPERATURE_EDEFAULT);
+				return;
+			case GapwrightPackage.MATERIAL__CURVE_SCALING:
+				setCurveScaling(CURVE_SCALING_EDEFAULT);
+				return;
+			case GapwrightPackage.MATERIAL__OTHER_CURVES:
+				getOtherCurves().clear();
+				return;
+			case GapwrightPackage.MATERIAL__PERMEABILITIES:
+				getPermeabilities().clear();
+				return;
+			case GapwrightPackage.MATERIAL__CURIE_TEMPERATURE:
+				setCurieTemperature(CURIE_TEMPERATURE_EDEFAULT);
+				return;
 		}
 		super.eUnset(featureID);
 	}
@@ -395,6 +624,16 @@ public class MaterialImpl extends ElementImpl implements Material {
 				return DENSITY_EDEFAULT == null ? density != null : !DENSITY_EDEFAULT.equals(density);
 			case GapwrightPackage.MATERIAL__SOURCE:
 				return SOURCE_EDEFAULT == null ? source != null : !SOURCE_EDEFAULT.equals(source);
+			case GapwrightPackage.MATERIAL__CURVE_TEMPERATURE:
+				return CURVE_TEMPERATURE_EDEFAULT == null ? curveTemperature != null : !CURVE_TEMPERATURE_EDEFAULT.equals(curveTemperature);
+			case GapwrightPackage.MATERIAL__CURVE_SCALING:
+				return curveScaling != CURVE_SCALING_EDEFAULT;
+			case GapwrightPackage.MATERIAL__OTHER_CURVES:
+				return otherCurves != null && !otherCurves.isEmpty();
+			case GapwrightPackage.MATERIAL__PERMEABILITIES:
+				return permeabilities != null && !permeabilities.isEmpty();
+			case GapwrightPackage.MATERIAL__CURIE_TEMPERATURE:
+				return CURIE_TEMPERATURE_EDEFAULT == null ? curieTemperature != null : !CURIE_TEMPERATURE_EDEFAULT.equals(curieTemperature);
 		}
 		return super.eIsSet(featureID);
 	}
@@ -413,6 +652,12 @@ public class MaterialImpl extends ElementImpl implements Material {
 		result.append(density);
 		result.append(", source: ");
 		result.append(source);
+		result.append(", curveTemperature: ");
+		result.append(curveTemperature);
+		result.append(", curveScaling: ");
+		result.append(curveScaling);
+		result.append(", curieTemperature: ");
+		result.append(curieTemperature);
 		result.append(')');
 		return result.toString();
 	}

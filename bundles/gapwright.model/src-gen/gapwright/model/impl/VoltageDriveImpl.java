@@ -5,6 +5,7 @@ package gapwright.model.impl;
 import gapwright.model.GapwrightFactory;
 import gapwright.model.GapwrightPackage;
 import gapwright.model.VoltageDrive;
+import gapwright.model.VoltageWaveform;
 
 import gapwright.model.quantity.Quantity;
 
@@ -25,6 +26,7 @@ import org.eclipse.emf.ecore.impl.ENotificationImpl;
  *   <li>{@link gapwright.model.impl.VoltageDriveImpl#getVoltage <em>Voltage</em>}</li>
  *   <li>{@link gapwright.model.impl.VoltageDriveImpl#getOnTime <em>On Time</em>}</li>
  *   <li>{@link gapwright.model.impl.VoltageDriveImpl#getBias <em>Bias</em>}</li>
+ *   <li>{@link gapwright.model.impl.VoltageDriveImpl#getWaveform <em>Waveform</em>}</li>
  * </ul>
  *
  * @generated
@@ -89,6 +91,26 @@ public class VoltageDriveImpl extends DriveImpl implements VoltageDrive {
 	 * @ordered
 	 */
 	protected Quantity bias = BIAS_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getWaveform() <em>Waveform</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getWaveform()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final VoltageWaveform WAVEFORM_EDEFAULT = VoltageWaveform.RECTANGULAR;
+
+	/**
+	 * The cached value of the '{@link #getWaveform() <em>Waveform</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getWaveform()
+	 * @generated
+	 * @ordered
+	 */
+	protected VoltageWaveform waveform = WAVEFORM_EDEFAULT;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -184,6 +206,29 @@ public class VoltageDriveImpl extends DriveImpl implements VoltageDrive {
 	 * @generated
 	 */
 	@Override
+	public VoltageWaveform getWaveform() {
+		return waveform;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setWaveform(VoltageWaveform newWaveform) {
+		VoltageWaveform oldWaveform = waveform;
+		waveform = newWaveform == null ? WAVEFORM_EDEFAULT : newWaveform;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, GapwrightPackage.VOLTAGE_DRIVE__WAVEFORM, oldWaveform, waveform));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public Object eGet(int featureID, boolean resolve, boolean coreType) {
 		switch (featureID) {
 			case GapwrightPackage.VOLTAGE_DRIVE__VOLTAGE:
@@ -192,6 +237,8 @@ public class VoltageDriveImpl extends DriveImpl implements VoltageDrive {
 				return getOnTime();
 			case GapwrightPackage.VOLTAGE_DRIVE__BIAS:
 				return getBias();
+			case GapwrightPackage.VOLTAGE_DRIVE__WAVEFORM:
+				return getWaveform();
 		}
 		return super.eGet(featureID, resolve, coreType);
 	}
@@ -212,6 +259,9 @@ public class VoltageDriveImpl extends DriveImpl implements VoltageDrive {
 				return;
 			case GapwrightPackage.VOLTAGE_DRIVE__BIAS:
 				setBias((Quantity)newValue);
+				return;
+			case GapwrightPackage.VOLTAGE_DRIVE__WAVEFORM:
+				setWaveform((VoltageWaveform)newValue);
 				return;
 		}
 		super.eSet(featureID, newValue);
@@ -234,6 +284,9 @@ public class VoltageDriveImpl extends DriveImpl implements VoltageDrive {
 			case GapwrightPackage.VOLTAGE_DRIVE__BIAS:
 				setBias(BIAS_EDEFAULT);
 				return;
+			case GapwrightPackage.VOLTAGE_DRIVE__WAVEFORM:
+				setWaveform(WAVEFORM_EDEFAULT);
+				return;
 		}
 		super.eUnset(featureID);
 	}
@@ -252,6 +305,8 @@ public class VoltageDriveImpl extends DriveImpl implements VoltageDrive {
 				return ON_TIME_EDEFAULT == null ? onTime != null : !ON_TIME_EDEFAULT.equals(onTime);
 			case GapwrightPackage.VOLTAGE_DRIVE__BIAS:
 				return BIAS_EDEFAULT == null ? bias != null : !BIAS_EDEFAULT.equals(bias);
+			case GapwrightPackage.VOLTAGE_DRIVE__WAVEFORM:
+				return waveform != WAVEFORM_EDEFAULT;
 		}
 		return super.eIsSet(featureID);
 	}
@@ -272,6 +327,8 @@ public class VoltageDriveImpl extends DriveImpl implements VoltageDrive {
 		result.append(onTime);
 		result.append(", bias: ");
 		result.append(bias);
+		result.append(", waveform: ");
+		result.append(waveform);
 		result.append(')');
 		return result.toString();
 	}

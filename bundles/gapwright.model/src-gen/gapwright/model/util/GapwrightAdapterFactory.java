@@ -140,6 +140,14 @@ public class GapwrightAdapterFactory extends AdapterFactoryImpl {
 				return createSaturationAdapter();
 			}
 			@Override
+			public Adapter caseCurveAtTemperature(CurveAtTemperature object) {
+				return createCurveAtTemperatureAdapter();
+			}
+			@Override
+			public Adapter caseInitialPermeability(InitialPermeability object) {
+				return createInitialPermeabilityAdapter();
+			}
+			@Override
 			public Adapter caseSteinmetzLoss(SteinmetzLoss object) {
 				return createSteinmetzLossAdapter();
 			}
@@ -162,6 +170,22 @@ public class GapwrightAdapterFactory extends AdapterFactoryImpl {
 			@Override
 			public Adapter caseLimits(Limits object) {
 				return createLimitsAdapter();
+			}
+			@Override
+			public Adapter caseWindingLeakage(WindingLeakage object) {
+				return createWindingLeakageAdapter();
+			}
+			@Override
+			public Adapter caseWindingConnection(WindingConnection object) {
+				return createWindingConnectionAdapter();
+			}
+			@Override
+			public Adapter caseConnectedWinding(ConnectedWinding object) {
+				return createConnectedWindingAdapter();
+			}
+			@Override
+			public Adapter caseTolerance(Tolerance object) {
+				return createToleranceAdapter();
 			}
 			@Override
 			public Adapter defaultCase(EObject object) {
@@ -436,6 +460,34 @@ public class GapwrightAdapterFactory extends AdapterFactoryImpl {
 	}
 
 	/**
+	 * Creates a new adapter for an object of class '{@link gapwright.model.CurveAtTemperature <em>Curve At Temperature</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see gapwright.model.CurveAtTemperature
+	 * @generated
+	 */
+	public Adapter createCurveAtTemperatureAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link gapwright.model.InitialPermeability <em>Initial Permeability</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see gapwright.model.InitialPermeability
+	 * @generated
+	 */
+	public Adapter createInitialPermeabilityAdapter() {
+		return null;
+	}
+
+	/**
 	 * Creates a new adapter for an object of class '{@link gapwright.model.SteinmetzLoss <em>Steinmetz Loss</em>}'.
 	 * <!-- begin-user-doc -->
 	 * This default implementation returns null so that we can easily ignore cases;
@@ -516,6 +568,62 @@ public class GapwrightAdapterFactory extends AdapterFactoryImpl {
 	 * @generated
 	 */
 	public Adapter createLimitsAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link gapwright.model.WindingLeakage <em>Winding Leakage</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see gapwright.model.WindingLeakage
+	 * @generated
+	 */
+	public Adapter createWindingLeakageAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link gapwright.model.WindingConnection <em>Winding Connection</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see gapwright.model.WindingConnection
+	 * @generated
+	 */
+	public Adapter createWindingConnectionAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link gapwright.model.ConnectedWinding <em>Connected Winding</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see gapwright.model.ConnectedWinding
+	 * @generated
+	 */
+	public Adapter createConnectedWindingAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link gapwright.model.Tolerance <em>Tolerance</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see gapwright.model.Tolerance
+	 * @generated
+	 */
+	public Adapter createToleranceAdapter() {
 		return null;
 	}
 

@@ -187,6 +187,18 @@ public class GapwrightSwitch<T> extends Switch<T> {
 				if (result == null) result = defaultCase(theEObject);
 				return result;
 			}
+			case GapwrightPackage.CURVE_AT_TEMPERATURE: {
+				CurveAtTemperature curveAtTemperature = (CurveAtTemperature)theEObject;
+				T result = caseCurveAtTemperature(curveAtTemperature);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case GapwrightPackage.INITIAL_PERMEABILITY: {
+				InitialPermeability initialPermeability = (InitialPermeability)theEObject;
+				T result = caseInitialPermeability(initialPermeability);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
 			case GapwrightPackage.STEINMETZ_LOSS: {
 				SteinmetzLoss steinmetzLoss = (SteinmetzLoss)theEObject;
 				T result = caseSteinmetzLoss(steinmetzLoss);
@@ -226,6 +238,33 @@ public class GapwrightSwitch<T> extends Switch<T> {
 			case GapwrightPackage.LIMITS: {
 				Limits limits = (Limits)theEObject;
 				T result = caseLimits(limits);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case GapwrightPackage.WINDING_LEAKAGE: {
+				WindingLeakage windingLeakage = (WindingLeakage)theEObject;
+				T result = caseWindingLeakage(windingLeakage);
+				if (result == null) result = caseElement(windingLeakage);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case GapwrightPackage.WINDING_CONNECTION: {
+				WindingConnection windingConnection = (WindingConnection)theEObject;
+				T result = caseWindingConnection(windingConnection);
+				if (result == null) result = caseElement(windingConnection);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case GapwrightPackage.CONNECTED_WINDING: {
+				ConnectedWinding connectedWinding = (ConnectedWinding)theEObject;
+				T result = caseConnectedWinding(connectedWinding);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case GapwrightPackage.TOLERANCE: {
+				Tolerance tolerance = (Tolerance)theEObject;
+				T result = caseTolerance(tolerance);
+				if (result == null) result = caseElement(tolerance);
 				if (result == null) result = defaultCase(theEObject);
 				return result;
 			}
@@ -504,6 +543,36 @@ public class GapwrightSwitch<T> extends Switch<T> {
 	}
 
 	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Curve At Temperature</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Curve At Temperature</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseCurveAtTemperature(CurveAtTemperature object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Initial Permeability</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Initial Permeability</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseInitialPermeability(InitialPermeability object) {
+		return null;
+	}
+
+	/**
 	 * Returns the result of interpreting the object as an instance of '<em>Steinmetz Loss</em>'.
 	 * <!-- begin-user-doc -->
 	 * This implementation returns null;
@@ -590,6 +659,66 @@ public class GapwrightSwitch<T> extends Switch<T> {
 	 * @generated
 	 */
 	public T caseLimits(Limits object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Winding Leakage</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Winding Leakage</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseWindingLeakage(WindingLeakage object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Winding Connection</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Winding Connection</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseWindingConnection(WindingConnection object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Connected Winding</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Connected Winding</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseConnectedWinding(ConnectedWinding object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Tolerance</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Tolerance</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseTolerance(Tolerance object) {
 		return null;
 	}
 

@@ -16,7 +16,9 @@ public enum Dimension {
 	PERMEANCE("a permeance", "H", "20 nH"),
 	DENSITY("a density", "kg/m³", "4800 kg/m³"),
 	/** Bare diameter of a round conductor, in m. */
-	WIRE("a wire", "m", "AWG 18 or 1.0 mm");
+	WIRE("a wire", "m", "AWG 18 or 1.0 mm"),
+	/** How far a value may be off to either side: a share of it, or an amount, which then has the amount's dimension. */
+	DEVIATION("a deviation", "1", "10 % or 0.05 mm");
 
 	private final String noun;
 	private final String unit;

@@ -1,6 +1,8 @@
 package gapwright.model.quantity;
 
 import java.math.BigDecimal;
+import java.util.EnumSet;
+import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
@@ -16,6 +18,9 @@ public final class Quantity {
 	private static final Pattern GAUGE = Pattern.compile("AWG\\s*(-?\\d{1,3})", Pattern.CASE_INSENSITIVE);
 	/** A longer text is no quantity; reading its digits would only cost time. */
 	private static final int MOST_CHARACTERS = 100;
+	/** What an amount of deviation may measure. */
+	private static final Set<Dimension> DEVIATING = EnumSet.of(Dimension.LENGTH, Dimension.AREA, Dimension.FLUX_DENSITY,
+			Dimension.CURRENT);
 	private static final int FINEST_GAUGE = 56;
 	private static final int COARSEST_GAUGE = -3;
 
@@ -33,7 +38,7 @@ public final class Quantity {
 	 * Reads a quantity. A point separates decimals; the unit is never left out; blanks between them are optional.
 	 *
 	 * @param text     for example "0.5 mm", "20mil", "1.2 cm²", "100 °C"; "AWG 18" where a wire is asked for
-	 * @param expected what it must measure
+	 * @param expected what it must measure; a deviation may be a share or an amount, its dimension is then the amount's
 	 * @throws QuantityFormatException saying what was found, why it will not do, and an example of what would
 	 */
 	public static Quantity parse(String text, Dimension expected) {
@@ -65,7 +70,7 @@ public final class Quantity {
 		if (Double.isInfinite(si) || si == 0 && magnitude.add(unit.offset()).signum() != 0) {
 			throw new QuantityFormatException(text, "out of the range of numbers", "e.g. " + expected.example());
 		}
-		return new Quantity(typed, expected, si);
+		return new Quantity(typed, expected == Dimension.DEVIATION ? unit.dimension() : expected, si);
 	}
 
 	private static void refuseMisspelling(String typed, Dimension expected) {
@@ -84,7 +89,8 @@ public final class Quantity {
 			throw new QuantityFormatException(text, "unknown unit '" + name + "'", similar.isEmpty()
 					? "expected " + expected.noun() + ", e.g. " + expected.example() : "did you mean " + similar + "?");
 		}
-		if (unit.dimension() != needed) {
+		boolean amount = expected == Dimension.DEVIATION && DEVIATING.contains(unit.dimension());
+		if (unit.dimension() != needed && !amount) {
 			throw new QuantityFormatException(text, "that is " + unit.dimension().noun(),
 					"expected " + expected.noun() + ", e.g. " + expected.example());
 		}

@@ -64,6 +64,8 @@ final class Units {
 		add(Dimension.DENSITY, "kg/m³", "1");
 		add(Dimension.DENSITY, "g/cm³", "1000");
 		add(Dimension.DENSITY, "kg/dm³", "1000");
+		add(Dimension.DEVIATION, "%", "0.01");
+		add(Dimension.DEVIATION, "‰", "0.001");
 	}
 
 	private Units() {
