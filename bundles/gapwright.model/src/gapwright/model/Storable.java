@@ -33,8 +33,8 @@ final class Storable {
 
 	private static void references(Design design, EObject object) throws IOException {
 		for (EReference reference : object.eClass().getEAllReferences()) {
-			if (!reference.isContainment() && object.eGet(reference) instanceof EObject target
-					&& EcoreUtil.getRootContainer(target) != design) {
+			if (!reference.isContainment() && References.of(object, reference).stream()
+					.anyMatch(target -> EcoreUtil.getRootContainer(target) != design)) {
 				throw new IOException(name(object) + ": " + reference.getName()
 						+ " refers to something that is not in the design any more");
 			}

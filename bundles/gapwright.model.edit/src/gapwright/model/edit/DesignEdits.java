@@ -56,7 +56,8 @@ public final class DesignEdits {
 
 	/**
 	 * Deletes elements with all that cannot be without them: the legs and air paths at a joint, the coils round a leg,
-	 * a winding whose last coil goes, the drives of a winding. Legs of a deleted material are left without one.
+	 * a winding whose last coil goes, the drives and leakages of a winding, its part in connections. Legs of a deleted
+	 * material are left without one; a tolerance goes with the last of its targets.
 	 */
 	public static Edit delete(Collection<? extends EObject> elements) {
 		Set<EObject> doomed = Dependants.of(elements);
@@ -65,8 +66,10 @@ public final class DesignEdits {
 		Set<EObject> owners = new LinkedHashSet<>();
 		doomed.forEach(element -> owners.add(element.eContainer()));
 		owners.addAll(Dependants.legsOf(doomed));
+		owners.addAll(Dependants.tolerancesOf(doomed));
 		return new Edit(label, owners, () -> {
 			Dependants.legsOf(doomed).forEach(leg -> leg.setMaterial(null));
+			Dependants.tolerancesOf(doomed).forEach(t -> t.getTargets().removeAll(Dependants.lostTargets(t, doomed)));
 			// remove, not delete: the references are known, a search through the whole model is not needed
 			doomed.forEach(EcoreUtil::remove);
 		});

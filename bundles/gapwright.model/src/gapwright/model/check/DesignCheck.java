@@ -24,6 +24,7 @@ import gapwright.model.Gap;
 import gapwright.model.Leg;
 import gapwright.model.LegGeometry;
 import gapwright.model.OperatingPoint;
+import gapwright.model.References;
 import gapwright.model.VoltageDrive;
 import gapwright.model.Winding;
 
@@ -54,6 +55,8 @@ public final class DesignCheck {
 		design.getAirPaths().forEach(check::airPath);
 		design.getWindings().forEach(check::winding);
 		design.getOperatingPoints().forEach(point -> check.operatingPoint(design, point));
+		new PairCheck(check.problems).check(design);
+		new ToleranceCheck(check.problems).check(design);
 		if (design.getOperatingPoints().isEmpty()) {
 			check.problems.add(ProblemCode.OPERATING_POINT_MISSING, design, DESIGN__OPERATING_POINTS,
 					"there is no operating point, so nothing is computed", "Add one on the Operating points page.");
@@ -64,8 +67,8 @@ public final class DesignCheck {
 	/** An element deleted elsewhere may still be referred to; nothing can be computed with it. */
 	private void references(Design design, EObject object) {
 		for (EReference reference : object.eClass().getEAllReferences()) {
-			if (!reference.isContainment() && object.eGet(reference) instanceof EObject target
-					&& EcoreUtil.getRootContainer(target) != design) {
+			if (!reference.isContainment() && References.of(object, reference).stream()
+					.anyMatch(target -> EcoreUtil.getRootContainer(target) != design)) {
 				problems.add(ProblemCode.REFERENCE_OUTSIDE, object, reference,
 						reference.getName() + " refers to something that is not in the design any more", "Choose another.");
 			}

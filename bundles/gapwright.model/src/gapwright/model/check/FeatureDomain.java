@@ -28,7 +28,8 @@ public final class FeatureDomain {
 
 	static {
 		for (EStructuralFeature size : new EStructuralFeature[] { LEG__WIDTH, LEG__DEPTH, LEG__DIAMETER,
-				LEG__PATH_LENGTH, MAGNET__LENGTH, GAP__WINDOW_HEIGHT, AIR_PATH__LENGTH }) {
+				LEG__PATH_LENGTH, MAGNET__LENGTH, GAP__WINDOW_HEIGHT, AIR_PATH__LENGTH, WINDING_LEAKAGE__FIRST_BUILD,
+				WINDING_LEAKAGE__SECOND_BUILD, WINDING_LEAKAGE__HEIGHT, WINDING_LEAKAGE__MEAN_TURN }) {
 			above0(size, "must be above 0");
 			LIKELY.put(size, new Range(1e-5, true, 2, "10 µm to 2 m"));
 		}
@@ -62,14 +63,23 @@ public final class FeatureDomain {
 			LIKELY.put(saturation, new Range(0.05, true, 2.6, "0.05 T to 2.6 T"));
 		}
 		LIKELY.put(CURVE_POINT__FLUX_DENSITY, new Range(0, true, 5, "up to 5 T"));
+		allow(INITIAL_PERMEABILITY__RELATIVE_PERMEABILITY, 1, false, INFINITE, "must be above 1");
+		LIKELY.put(INITIAL_PERMEABILITY__RELATIVE_PERMEABILITY, new Range(1, true, 1e6, "up to 1000000"));
+		allow(WINDING_LEAKAGE__SEPARATION, 0, true, INFINITE, "must be 0 or above");
+		LIKELY.put(WINDING_LEAKAGE__SEPARATION, new Range(0, true, 0.5, "up to 0.5 m"));
+		allow(WINDING_LEAKAGE__INTERFACES, 1, true, 1000, "must be a whole number from 1 to 1000");
+		allow(TOLERANCE__DEVIATION, 0, true, INFINITE, "must be 0 or above, to either side");
 		above0(ROLL_OFF_CURVE__HALF_FIELD_STRENGTH, "must be above 0");
 		allow(ROLL_OFF_CURVE__EXPONENT, 1, false, INFINITE, "must be above 1");
 		above0(AIR_PATH__PERMEANCE, "must be above 0");
 		for (EStructuralFeature temperature : new EStructuralFeature[] { OPERATING_POINT__TEMPERATURE,
-				SATURATION__TEMPERATURE, STEINMETZ_LOSS__TEMPERATURE }) {
+				SATURATION__TEMPERATURE, STEINMETZ_LOSS__TEMPERATURE, MATERIAL__CURVE_TEMPERATURE,
+				CURVE_AT_TEMPERATURE__TEMPERATURE, INITIAL_PERMEABILITY__TEMPERATURE }) {
 			allow(temperature, -273.15, true, 1000, "must be from -273.15 °C to 1000 °C");
 			LIKELY.put(temperature, new Range(-60, true, 250, "-60 °C to 250 °C"));
 		}
+		allow(MATERIAL__CURIE_TEMPERATURE, -273.15, true, 1500, "must be from -273.15 °C to 1500 °C");
+		LIKELY.put(MATERIAL__CURIE_TEMPERATURE, new Range(50, true, 1150, "50 °C to 1150 °C"));
 		for (EStructuralFeature positive : new EStructuralFeature[] { OPERATING_POINT__FREQUENCY,
 				VOLTAGE_DRIVE__ON_TIME, MATERIAL__DENSITY, WINDING__WIRE, STEINMETZ_LOSS__COEFFICIENT,
 				STEINMETZ_LOSS__FREQUENCY_EXPONENT, STEINMETZ_LOSS__FLUX_DENSITY_EXPONENT,

@@ -4,9 +4,13 @@ import static gapwright.model.GapwrightPackage.Literals.*;
 import static gapwright.model.LegGeometry.si;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 
+import gapwright.model.CurveAtTemperature;
 import gapwright.model.CurvePoint;
+import gapwright.model.InitialPermeability;
 import gapwright.model.Material;
 import gapwright.model.Saturation;
 import gapwright.model.SteinmetzLoss;
@@ -20,6 +24,8 @@ final class MaterialCheck {
 
 	/** No soft magnetic material is more permeable at its first point. */
 	private static final double MOST_PERMEABLE = 1e6;
+	/** °C; what a curve without a temperature holds at. */
+	private static final double ROOM_TEMPERATURE = 25;
 	private static final String UNITS = "Are the units right? 1 Oe is 79.58 A/m, 1 G is 0.1 mT.";
 
 	private final Problems problems;
@@ -34,6 +40,8 @@ final class MaterialCheck {
 		} else if (material.getCurve() instanceof TableCurve table) {
 			table(material, table);
 		}
+		otherCurves(material);
+		permeabilities(material);
 		if (material.getSaturations().isEmpty()) {
 			problems.add(ProblemCode.SATURATION_MISSING, material, MATERIAL__SATURATIONS,
 					"no saturation is given, so legs of this material cannot be judged",
@@ -41,6 +49,32 @@ final class MaterialCheck {
 		}
 		saturations(material);
 		loss(material.getLoss());
+	}
+
+	private void otherCurves(Material material) {
+		Set<Double> temperatures = new HashSet<>();
+		temperatures.add(material.getCurveTemperature() == null ? ROOM_TEMPERATURE : material.getCurveTemperature().si());
+		for (CurveAtTemperature other : material.getOtherCurves()) {
+			if (other.getCurve() == null) {
+				problems.add(ProblemCode.VALUE_MISSING, other, CURVE_AT_TEMPERATURE__CURVE, "the B-H curve is missing", "");
+			} else if (other.getCurve() instanceof TableCurve table) {
+				table(material, table);
+			}
+			if (other.getTemperature() != null && !temperatures.add(other.getTemperature().si())) {
+				problems.add(ProblemCode.CURVE_TEMPERATURE_TWICE, other, CURVE_AT_TEMPERATURE__TEMPERATURE,
+						"two curves are given at " + other.getTemperature(), "Keep one of them.");
+			}
+		}
+	}
+
+	private void permeabilities(Material material) {
+		Set<Double> temperatures = new HashSet<>();
+		for (InitialPermeability permeability : material.getPermeabilities()) {
+			if (permeability.getTemperature() != null && !temperatures.add(permeability.getTemperature().si())) {
+				problems.add(ProblemCode.PERMEABILITY_TEMPERATURE_TWICE, permeability, INITIAL_PERMEABILITY__TEMPERATURE,
+						"two initial permeabilities are given at " + permeability.getTemperature(), "Keep one of them.");
+			}
+		}
 	}
 
 	private void loss(SteinmetzLoss loss) {

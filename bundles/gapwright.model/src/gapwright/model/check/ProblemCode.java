@@ -27,7 +27,15 @@ public enum ProblemCode {
 	ON_TIME_LONGER_THAN_PERIOD("on-time-longer-than-period", Severity.ERROR),
 	LOSS_RANGE_EMPTY("loss-range-empty", Severity.ERROR),
 	TABLE_SLOPE_IMPLAUSIBLE("table-slope-implausible", Severity.WARNING),
-	GAP_LONGER_THAN_DRAWN("gap-longer-than-drawn", Severity.NOTE);
+	GAP_LONGER_THAN_DRAWN("gap-longer-than-drawn", Severity.NOTE),
+	WINDING_TWICE("winding-twice", Severity.ERROR),
+	CONNECTION_INCOMPLETE("connection-incomplete", Severity.ERROR),
+	TOLERANCE_WITHOUT_TARGET("tolerance-without-target", Severity.ERROR),
+	TOLERANCE_UNFIT("tolerance-unfit", Severity.ERROR),
+	TOLERANCE_TWICE("tolerance-twice", Severity.ERROR),
+	TOLERANCE_REACHES_OUTSIDE("tolerance-reaches-outside", Severity.ERROR),
+	PERMEABILITY_TEMPERATURE_TWICE("permeability-temperature-twice", Severity.ERROR),
+	CURVE_TEMPERATURE_TWICE("curve-temperature-twice", Severity.ERROR);
 
 	private final String code;
 	private final Severity severity;

@@ -40,31 +40,48 @@ class DeletingTest {
 	@Test
 	void aJointTakesItsLegsAirPathsAndTheirCoils() {
 		takes(List.of("b"), "b", "top", "gap-1", "gap-2", "magnet", "right", "corner", "main-top", "sense-top", "sense",
-				"full-sense");
+				"full-sense", "main-sense", "grinding");
+	}
+
+	@Test
+	void aToleranceGoesWithTheLastOfItsTargets() {
+		takes(List.of("gap-1"), "gap-1");
+		takes(List.of("gap-1", "gap-2"), "gap-1", "gap-2", "grinding");
+		takes(List.of("ferrite"), "ferrite", "firing");
+	}
+
+	@Test
+	void aConnectionGoesWithTheLastOfItsWindings() {
+		takes(List.of("main", "sense"), "main", "main-top", "main-left", "full-main", "cold-main", "sense", "sense-top",
+				"full-sense", "main-sense", "both");
 	}
 
 	@Test
 	void aLegTakesItsCoilsAndAWindingThatHasNoOther() {
 		takes(List.of("left"), "left", "main-left");
-		takes(List.of("top"), "top", "gap-1", "gap-2", "magnet", "main-top", "sense-top", "sense", "full-sense");
+		takes(List.of("top"), "top", "gap-1", "gap-2", "magnet", "main-top", "sense-top", "sense", "full-sense",
+				"main-sense", "grinding");
 	}
 
 	@Test
 	void theLastCoilTakesItsWindingAndTheWindingItsDrives() {
 		takes(List.of("main-top"), "main-top");
-		takes(List.of("main-top", "main-left"), "main-top", "main-left", "main", "full-main", "cold-main");
-		takes(List.of("main"), "main-top", "main-left", "main", "full-main", "cold-main");
+		takes(List.of("main-top", "main-left"), "main-top", "main-left", "main", "full-main", "cold-main",
+				"main-sense");
+		takes(List.of("main"), "main-top", "main-left", "main", "full-main", "cold-main",
+				"main-sense");
 	}
 
 	@Test
 	void whatLiesInsideSomethingDeletedNeedsNoStepOfItsOwn() {
-		takes(List.of("gap-1", "top", "magnet"), "top", "gap-1", "gap-2", "magnet", "main-top", "sense-top", "sense", "full-sense");
+		takes(List.of("gap-1", "top", "magnet"), "top", "gap-1", "gap-2", "magnet", "main-top", "sense-top", "sense", "full-sense",
+				"main-sense", "grinding");
 		takes(List.of("full", "full-main"), "full", "full-main", "full-sense");
 	}
 
 	@Test
 	void aMaterialLeavesItsLegsWithoutOne() {
-		takes(List.of("ferrite"), "ferrite");
+		takes(List.of("ferrite"), "ferrite", "firing");
 		Design design = Sample.design();
 		new EditHistory().run(DesignEdits.delete(List.of(design.getMaterials().get(0))));
 		assertNull(Sample.<Leg>get(design, "top").getMaterial());

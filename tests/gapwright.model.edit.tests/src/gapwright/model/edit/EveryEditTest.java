@@ -25,6 +25,7 @@ import org.eclipse.emf.ecore.util.EcoreUtil;
 import org.junit.jupiter.api.Test;
 
 import gapwright.model.Coil;
+import gapwright.model.ConnectionKind;
 import gapwright.model.Design;
 import gapwright.model.GapwrightFactory;
 import gapwright.model.GapwrightPackage.Literals;
@@ -33,6 +34,7 @@ import gapwright.model.Leg;
 import gapwright.model.Material;
 import gapwright.model.OperatingPoint;
 import gapwright.model.TableCurve;
+import gapwright.model.TolerancedFeature;
 import gapwright.model.Winding;
 import gapwright.model.edit.history.Edit;
 import gapwright.model.edit.history.EditHistory;
@@ -92,7 +94,7 @@ class EveryEditTest {
 		EDITS.put("DesignEdits.set a reference", d -> DesignEdits.set("Change", leg(d, "left"), Literals.LEG__MATERIAL, d.getMaterials().get(1)));
 		EDITS.put("DesignEdits.set a name", d -> DesignEdits.set("Change", d, Literals.DESIGN__NAME, "<\u6c34 & \"pump\">\n2"));
 		for (String id : List.of("a", "top", "gap-1", "magnet", "window", "main", "main-top", "sense-top", "full", "full-main",
-				"ferrite", "steel")) {
+				"ferrite", "steel", "sense", "main-sense", "both", "grinding", "gap-2")) {
 			EDITS.put("DesignEdits.delete " + id, d -> DesignEdits.delete(List.of(Sample.get(d, id))));
 		}
 		EDITS.put("DesignEdits.delete some of everything",
@@ -101,6 +103,11 @@ class EveryEditTest {
 		EDITS.put("DesignEdits.delete all that is drawn", d -> DesignEdits.delete(d.getJoints()));
 		EDITS.put("DesignEdits.remove", d -> DesignEdits.remove("Remove", material(d).getSaturations().get(0)));
 		EDITS.put("DesignEdits.limits", d -> DesignEdits.limits(d, false));
+		EDITS.put("ToleranceEdits.add", d -> ToleranceEdits.add(d, List.of(leg(d, "top")), TolerancedFeature.WIDTH, mm("0.1 mm")));
+		EDITS.put("ToleranceEdits.retarget", d -> ToleranceEdits.retarget(d.getTolerances().get(0), leg(d, "top").getGaps().subList(0, 1)));
+		EDITS.put("PairEdits.addLeakage", d -> PairEdits.addLeakage(d, winding(d, "sense"), winding(d, "main")));
+		EDITS.put("PairEdits.addConnection", d -> PairEdits.addConnection(d, ConnectionKind.PARALLEL, d.getWindings()));
+		EDITS.put("PairEdits.join", d -> PairEdits.join(d.getConnections().get(0), winding(d, "main")));
 		EDITS.put("Snippet.paste", d -> Snippet.paste(d, Snippet.copy(d.getLegs()), 5, 5, made -> { }));
 		EDITS.put("Snippet.paste a joint", d -> Snippet.paste(d, Snippet.copy(List.of(joint(d, "b"))), 5, 5, made -> { }));
 	}

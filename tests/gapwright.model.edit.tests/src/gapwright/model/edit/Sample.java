@@ -61,6 +61,13 @@ final class Sample {
 			    <drives xsi:type="gapwright:CurrentDrive" id="cold-main" winding="main" current="2 A"/>
 			  </operatingPoints>
 			  <limits nearFraction="0.75"/>
+			  <leakages id="main-sense" first="main" second="sense" firstBuild="3 mm" secondBuild="1 mm" separation="0.2 mm" height="20 mm" meanTurn="60 mm"/>
+			  <connections id="both">
+			    <members winding="main"/>
+			    <members winding="sense" reversed="true"/>
+			  </connections>
+			  <tolerances id="grinding" targets="gap-1 gap-2" deviation="0.05 mm"/>
+			  <tolerances id="firing" targets="ferrite" feature="PERMEABILITY" deviation="25 %" distribution="NORMAL"/>
 			</gapwright:Design>
 			""";
 

@@ -47,6 +47,10 @@ class DesignCheckTest {
 		return table + "</curve>";
 	}
 
+	private static String tolerance(String attributes) {
+		return "<tolerances id=\"t\" " + attributes + "/></gapwright:Design>";
+	}
+
 	static {
 		// values
 		fault("width=\"12 mm\" depth=\"15 mm\">", "width=\"0 mm\" depth=\"15 mm\">",
@@ -124,6 +128,38 @@ class DesignCheckTest {
 		fault("</materials>",
 				"<loss coefficient=\"1\" frequencyExponent=\"1.4\" fluxDensityExponent=\"2.5\" minimumFrequency=\"1 MHz\" maximumFrequency=\"1 kHz\"/></materials>",
 				"ERROR loss-range-empty ferrite: minimumFrequency = '1 MHz': above maximumFrequency = '1 kHz' | Exchange them.");
+		fault("</materials>", "<permeabilities temperature=\"25 °C\" relativePermeability=\"2300\"/>"
+				+ "<permeabilities temperature=\"298.15 K\" relativePermeability=\"2400\"/></materials>",
+				"ERROR permeability-temperature-twice ferrite: two initial permeabilities are given at 298.15 K | Keep one of them.");
+		fault("</materials>", "<otherCurves temperature=\"25 °C\">" + KNEE + "</otherCurves><otherCurves temperature=\"100 °C\"/></materials>",
+				"ERROR curve-temperature-twice ferrite: two curves are given at 25 °C | Keep one of them.",
+				"ERROR value-missing ferrite: the B-H curve is missing | ");
+		// pairs of windings
+		fault("</gapwright:Design>", "<leakages id=\"own\" first=\"main\" second=\"main\" firstBuild=\"3 mm\" secondBuild=\"1 mm\""
+				+ " separation=\"-1 mm\" height=\"20 mm\" meanTurn=\"60 mm\"/></gapwright:Design>",
+				"ERROR value-out-of-domain own: separation = '-1 mm': must be 0 or above | ",
+				"ERROR winding-twice own: both windings are 'main' | Choose another for one of them.");
+		fault("</gapwright:Design>", "<connections id=\"pair\"><members winding=\"main\"/></connections></gapwright:Design>",
+				"ERROR connection-incomplete pair: a connection joins at least two windings, this one has 1 | Join another winding, or delete it.");
+		fault("</gapwright:Design>", "<connections id=\"pair\"><members winding=\"main\"/><members winding=\"main\"/></connections></gapwright:Design>",
+				"ERROR winding-twice pair: the winding 'main' is joined twice | Keep it once.");
+		// tolerances
+		fault("</gapwright:Design>", tolerance("targets=\"gap\" deviation=\"0.9 mm\""),
+				"ERROR tolerance-reaches-outside t: deviation = '0.9 mm': the gap length of 'gap' reaches a negative gap | Make the deviation smaller.");
+		fault("</gapwright:Design>", tolerance("targets=\"back\" feature=\"STACKING_FACTOR\" deviation=\"5 %\""),
+				"ERROR tolerance-reaches-outside t: deviation = '5 %': the stacking factor of 'back' reaches outside 0 to 1 | Make the deviation smaller.");
+		fault("</gapwright:Design>", tolerance("deviation=\"5 %\""),
+				"ERROR tolerance-without-target t: the tolerance is on no element | Choose the elements it is for, or delete it.");
+		fault("</gapwright:Design>", tolerance("targets=\"gap\" feature=\"WIDTH\" deviation=\"5 %\""),
+				"ERROR tolerance-unfit t: 'gap' has no width | Choose another value or another element.");
+		fault("</gapwright:Design>", tolerance("targets=\"gap\" deviation=\"5 mT\""),
+				"ERROR tolerance-unfit t: deviation = '5 mT': the gap length deviates by a share, e.g. 10 %, or by a length, e.g. 0.5 mm | ");
+		fault("</gapwright:Design>", tolerance("targets=\"ferrite\" feature=\"PERMEABILITY\" deviation=\"5 mm\""),
+				"ERROR tolerance-unfit t: deviation = '5 mm': the permeability deviates by a share, e.g. 10 % | ");
+		fault("</gapwright:Design>", "<tolerances id=\"s\" targets=\"gap\" deviation=\"5 %\"/>" + tolerance("targets=\"gap\" deviation=\"5 %\""),
+				"ERROR tolerance-twice t: the gap length of 'gap' already has the tolerance 's' | Keep one.");
+		fault("</gapwright:Design>", tolerance("targets=\"main\" feature=\"CURRENT\" deviation=\"-1 A\""),
+				"ERROR value-out-of-domain t: deviation = '-1 A': must be 0 or above, to either side | ");
 		// legs
 		fault("to=\"b\" material=\"ferrite\"", "to=\"a\" material=\"ferrite\"",
 				"ERROR same-joint-twice wound: both ends are attached to the joint 'a' | Attach one end to another joint.");
