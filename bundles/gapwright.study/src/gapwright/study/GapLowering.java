@@ -1,64 +1,95 @@
 package gapwright.study;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 
+import gapwright.model.Design;
 import gapwright.model.Gap;
+import gapwright.model.GapPlace;
+import gapwright.model.Joint;
 import gapwright.model.Leg;
 import gapwright.model.LegGeometry;
 import gapwright.model.SectionShape;
 import gapwright.physics.gap.Fringing;
+import gapwright.physics.gap.GapGeometry;
+import gapwright.physics.gap.Judgement;
 import gapwright.physics.gap.Section;
 
-/** Permeances of a leg's gaps, with a finding wherever a method is used outside its validity. */
+/** Permeances of the gaps, with a finding wherever a method is used outside its validity. */
 final class GapLowering {
 
 	private final Findings findings;
+	private final Map<Joint, List<Leg>> byJoint;
+	private final Map<Gap, GapGeometry> geometries = new HashMap<>();
+	private final Map<Gap, GapWindow> windows = new HashMap<>();
 
-	GapLowering(Findings findings) {
+	GapLowering(Design design, Findings findings) {
 		this.findings = findings;
+		byJoint = GapWindow.legsByJoint(design);
 	}
 
 	/** Reports what is wrong with the leg's gaps. @return whether every gap has a number */
 	boolean read(Leg leg) {
 		boolean all = true;
+		Section section = section(leg);
 		for (Gap gap : leg.getGaps()) {
-			all &= read(leg, gap);
+			all &= section == null || !isSlot(gap) || read(leg, gap, section);
 		}
 		return all;
 	}
 
-	private boolean read(Leg leg, Gap gap) {
+	private boolean read(Leg leg, Gap gap, Section section) {
 		Fringing method = method(gap);
-		if (method == null) {
-			findings.error("gap-method-unavailable", Lowering.id(gap),
-					"the method " + gap.getFringing() + " is not available in this version",
-					"Choose WIDENED, or NONE for a lower bound of the inductance.");
+		GapGeometry geometry = GapGeometry.plain(section, gap.getLength().si(), gap.getPieces());
+		if (method.needsWindow()) {
+			GapWindow window = GapWindow.of(leg, gap, byJoint);
+			if (window == null) {
+				findings.error("gap-window-height-missing", Lowering.id(gap), method
+						+ " needs the height of the window beside the gap, which " + (leg.getShape() == SectionShape.GIVEN
+								? "a leg of given area does not show"
+								: "the bars at both ends of the leg leave no room for"),
+						"Type the window height, or choose WIDENED.");
+				return false;
+			}
+			windows.put(gap, window);
+			geometry = new GapGeometry(section, geometry.length(), gap.getPieces(), place(gap), window.toFirst(), window.toSecond());
+			if (!window.given()) {
+				findings.note("gap-window-height-derived", Lowering.id(gap), "the window beside the gap is "
+						+ Figures.millimetres(geometry.windowHeight()) + " high as drawn, since its height is not given", "");
+			}
+		}
+		geometries.put(gap, geometry);
+		if (!judge(gap, method, geometry)) {
 			return false;
-		}
-		Section section = section(leg);
-		if (section == null || !isSlot(gap)) {
-			return true;
-		}
-		double length = gap.getLength().si();
-		String ratio = "a gap of " + gap.getLength() + " across a least side of "
-				+ Figures.millimetres(section.leastSide());
-		switch (method.validity(section, length)) {
-		case REFUSED -> {
-			findings.error("gap-method-refused", Lowering.id(gap), ratio + " is outside what " + method + " can give",
-					"Split the gap in pieces.");
-			return false;
-		}
-		case DOUBTFUL -> findings.warning("gap-method-outside-validity", Lowering.id(gap),
-				ratio + " is outside the range of " + method + ", which reads the inductance low there",
-				method == Fringing.NONE ? "WIDENED comes closer." : "Split the gap in pieces.");
-		case VALID -> {
-			// nothing to say
-		}
 		}
 		if (leg.getShape() == SectionShape.GIVEN && method != Fringing.NONE) {
 			findings.note("gap-square-assumed", Lowering.id(gap),
 					"the leg gives only an area, so its section is taken as a square of that area", "");
+		}
+		if (gap.getPlace() == GapPlace.BETWEEN_POLES && method == Fringing.CONFORMAL) {
+			findings.note("gap-in-open-air", Lowering.id(gap), "between poles in the open CONFORMAL reads the permeance low: "
+					+ (section instanceof Section.Round ? "7 % at a gap of 3 % of the diameter, 23 % at 20 %"
+							: "2 % at a gap of 3 % of the width, 16 % at 40 %"),
+					"");
+		}
+		return true;
+	}
+
+	private boolean judge(Gap gap, Fringing method, GapGeometry geometry) {
+		Judgement judgement = method.judge(geometry);
+		switch (judgement.validity()) {
+		case REFUSED -> {
+			findings.error("gap-method-refused", Lowering.id(gap), method + " cannot give a number: " + judgement.reason(),
+					judgement.better());
+			return false;
+		}
+		case DOUBTFUL -> findings.warning("gap-method-outside-validity", Lowering.id(gap),
+				method + " is used outside its range: " + judgement.reason(), judgement.better());
+		case VALID -> {
+			// nothing to say
+		}
 		}
 		return true;
 	}
@@ -68,7 +99,7 @@ final class GapLowering {
 		double sum = 0;
 		for (Gap gap : leg.getGaps()) {
 			if (isSlot(gap)) {
-				sum += 1 / method(gap).permeance(section(leg), gap.getLength().si(), gap.getPieces());
+				sum += 1 / method(gap).permeance(geometries.get(gap));
 			}
 		}
 		return sum;
@@ -78,13 +109,16 @@ final class GapLowering {
 		List<StudyInput.GapData> data = new ArrayList<>();
 		for (Gap gap : leg.getGaps()) {
 			if (isSlot(gap)) {
-				Fringing method = method(gap);
-				double length = gap.getLength().si();
-				data.add(new StudyInput.GapData(Lowering.id(gap), Lowering.id(leg), legIndex,
-						method.permeance(section(leg), length, gap.getPieces()), method.factor(section(leg), length)));
+				GapWindow window = windows.get(gap);
+				data.add(new StudyInput.GapData(Lowering.id(gap), Lowering.id(leg), legIndex, method(gap), geometries.get(gap),
+						window == null ? null : barId(window.firstBar()), window == null ? null : barId(window.secondBar())));
 			}
 		}
 		return data;
+	}
+
+	private static String barId(Leg bar) {
+		return bar == null ? null : Lowering.id(bar);
 	}
 
 	private static boolean isSlot(Gap gap) {
@@ -92,11 +126,11 @@ final class GapLowering {
 	}
 
 	private static Fringing method(Gap gap) {
-		return switch (gap.getFringing()) {
-		case NONE -> Fringing.NONE;
-		case WIDENED -> Fringing.WIDENED;
-		default -> null;
-		};
+		return Fringing.valueOf(gap.getFringing().getName());
+	}
+
+	private static GapGeometry.Place place(Gap gap) {
+		return GapGeometry.Place.valueOf(gap.getPlace().getName());
 	}
 
 	/** @return null when the leg's dimensions are not usable, which has been reported */

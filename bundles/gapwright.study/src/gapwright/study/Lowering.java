@@ -70,7 +70,7 @@ public final class Lowering {
 			}
 		}
 		materials();
-		GapLowering gapLowering = new GapLowering(findings);
+		GapLowering gapLowering = new GapLowering(design, findings);
 		for (Leg leg : design.getLegs()) {
 			boolean unplaced = broken.contains(leg.getFrom()) || broken.contains(leg.getTo());
 			if (unplaced || broken.contains(leg.getMaterial()) || !gapLowering.read(leg)) {

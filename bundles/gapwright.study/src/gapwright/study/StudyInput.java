@@ -2,6 +2,8 @@ package gapwright.study;
 
 import java.util.List;
 
+import gapwright.physics.gap.Fringing;
+import gapwright.physics.gap.GapGeometry;
 import gapwright.physics.network.Network;
 
 /**
@@ -14,8 +16,23 @@ public final class StudyInput {
 	record LegData(String id, SaturationData saturation, String material) {
 	}
 
-	/** A gap whose permeance is known. */
-	record GapData(String id, String leg, int legIndex, double permeance, double fringingFactor) {
+	/**
+	 * A gap whose permeance is known.
+	 *
+	 * @param firstBar  id of the leg whose width, as drawn, ends the window towards the gap's first end; null where that
+	 *                  distance does not depend on a leg's width
+	 * @param secondBar likewise towards the other end
+	 */
+	record GapData(String id, String leg, int legIndex, Fringing method, GapGeometry geometry, String firstBar,
+			String secondBar) {
+
+		double permeance() {
+			return method.permeance(geometry);
+		}
+
+		double fringingFactor() {
+			return method.factor(geometry).value();
+		}
 	}
 
 	/** How a winding is driven at a point. Mean and ripple for a current; bias and swing for a voltage. */

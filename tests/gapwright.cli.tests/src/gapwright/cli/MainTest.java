@@ -168,10 +168,10 @@ class MainTest {
 
 	@Test
 	void whatCannotBeComputedIsToldOnStandardErrorToo() throws IOException {
-		String file = changed(NEAR, "fringing=\"WIDENED\"", "fringing=\"CONFORMAL\"");
+		String file = changed(NEAR, "fringing=\"WIDENED\"", "fringing=\"CONFORMAL\" windowHeight=\"0.5 mm\"");
 		assertEquals(65, run("check", file));
 		assertTrue(err.startsWith(file + ":centre-leg-gap: "), err);
-		assertTrue(out.contains("gap-method-unavailable") && out.contains("worst: not computed"), out);
+		assertTrue(out.contains("gap-method-refused") && out.contains("worst: not computed"), out);
 	}
 
 	@Test

@@ -11,6 +11,7 @@ import java.util.Arrays;
 import org.junit.jupiter.api.Test;
 
 import gapwright.physics.gap.Fringing;
+import gapwright.physics.gap.GapGeometry;
 import gapwright.physics.gap.Section;
 import gapwright.physics.material.BhCurve;
 import gapwright.physics.material.KneeBh;
@@ -30,7 +31,7 @@ class KnownAnswersTest {
 		Network.Builder b = Network.builder();
 		int top = b.joint();
 		int bottom = b.joint();
-		double gap = 1 / Fringing.NONE.permeance(new Section.Rectangular(0.03, 0.03), 0.0005, 1);
+		double gap = 1 / Fringing.NONE.permeance(GapGeometry.plain(new Section.Rectangular(0.03, 0.03), 0.0005, 1));
 		double core = 0.15 / (BhCurve.MU_0 * 70_000 * 9e-4);
 		assertEquals(3.79e3, 2 * core, 5);
 		assertEquals(4.42e5, gap, 500);
