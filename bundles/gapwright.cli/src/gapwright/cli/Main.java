@@ -8,18 +8,24 @@ import java.util.Arrays;
 import java.util.List;
 
 /**
- * The command line. Two verbs and three options do not repay an argument library, whose start alone would take a good
+ * The command line. A few verbs and options do not repay an argument library, whose start alone would take a good
  * part of the time a cold check may last.
  */
 public final class Main {
 
 	private static final String HELP = """
 			usage: gapwright check FILE… [--json | --csv]
+			       gapwright sweep FILE… [--winding ID] [--point ID] [--from A] [--to A] [--steps N] [--json | --csv]
 			       gapwright --help | --version
 
 			check   computes every design at all its operating points and judges each leg against saturation
 			        --json   one JSON object a line and file, SI units
 			        --csv    one line per leg and operating point, SI units
+			sweep   inductance and flux densities against the current of a winding, the others held
+			        --winding ID  what is swept; left out: the winding with the most current
+			        --point ID    operating point whose temperature and other currents hold; left out: the first
+			        --from, --to  currents with a unit, "14 A"; left out: 0 A to 1.5 times the largest of all points
+			        --steps N     equal steps; left out: 20
 
 			exit status: 0 all within, 1 something near saturation or not judged, 2 something over,
 			             64 wrong usage, 65 a design cannot be read or solved, 70 a fault of this program
@@ -53,6 +59,8 @@ public final class Main {
 				return ExitStatus.WITHIN;
 			case "check":
 				return new CheckCommand(out, err).run(arguments.subList(1, arguments.size()));
+			case "sweep":
+				return new SweepCommand(out, err).run(arguments.subList(1, arguments.size()));
 			case "":
 				throw new UsageException("no verb is given");
 			default:

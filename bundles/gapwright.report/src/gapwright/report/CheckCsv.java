@@ -28,17 +28,9 @@ public final class CheckCsv {
 			for (LegResult leg : point.legs()) {
 				text.append(Stream.of(file, point.id(), leg.id(), leg.flux(), leg.fluxDensity(), leg.fieldStrength(),
 						leg.mmfDrop(), leg.saturation(), leg.peakFluxDensity(), leg.utilisation(), leg.state().word())
-						.map(CheckCsv::cell).collect(Collectors.joining(","))).append("\r\n");
+						.map(CsvCell::of).collect(Collectors.joining(","))).append("\r\n");
 			}
 		}
 		return text.toString();
-	}
-
-	private static String cell(Object value) {
-		if (value instanceof Double number) {
-			return number.isNaN() ? "" : number.toString();
-		}
-		String text = value.toString();
-		return text.matches("[^\",\r\n]*") ? text : '"' + text.replace("\"", "\"\"") + '"';
 	}
 }

@@ -9,8 +9,11 @@ import java.util.Locale;
 import com.google.gson.stream.JsonWriter;
 
 import gapwright.study.AirPathResult;
+import gapwright.study.ConnectionResult;
 import gapwright.study.Finding;
 import gapwright.study.GapResult;
+import gapwright.study.InductanceMatrix;
+import gapwright.study.LeakageResult;
 import gapwright.study.LegResult;
 import gapwright.study.LegState;
 import gapwright.study.OperatingPointResult;
@@ -101,31 +104,78 @@ public final class CheckJson {
 			number("current", winding.current());
 			number("linkage", winding.linkage());
 			number("apparentInductance", winding.apparentInductance());
+			number("lowestCurrent", winding.lowestCurrent());
+			number("highestCurrent", winding.highestCurrent());
+			number("inductanceFactor", winding.inductanceFactor());
 			json.endObject();
 		}
 		json.endArray();
-		inductance(point.inductance().windings(), point.inductance().differential());
+		inductance(point.inductance());
+		leakages(point);
 		json.endObject();
 	}
 
-	private void inductance(List<String> windings, double[][] matrix) throws IOException {
+	private void leakages(OperatingPointResult point) throws IOException {
+		json.name("leakages").beginArray();
+		for (LeakageResult leakage : point.leakages()) {
+			json.beginObject().name("id").value(leakage.id());
+			json.name("first").value(leakage.first()).name("second").value(leakage.second());
+			number("inductance", leakage.inductance());
+			number("rogowskiFactor", leakage.rogowskiFactor());
+			number("shortCircuitInductance", leakage.shortCircuit());
+			number("coupling", leakage.coupling());
+			json.endObject();
+		}
+		json.endArray().name("connections").beginArray();
+		for (ConnectionResult connection : point.connections()) {
+			json.beginObject().name("id").value(connection.id()).name("kind").value(connection.series() ? "series" : "parallel");
+			json.name("windings").beginArray();
+			for (String winding : connection.windings()) {
+				json.value(winding);
+			}
+			json.endArray();
+			number("inductance", connection.inductance());
+			json.endObject();
+		}
+		json.endArray();
+	}
+
+	private void inductance(InductanceMatrix matrix) throws IOException {
 		json.name("inductance").beginObject().name("windings").beginArray();
-		for (String winding : windings) {
+		for (String winding : matrix.windings()) {
 			json.value(winding);
 		}
-		json.endArray().name("differential").beginArray();
-		for (double[] row : matrix) {
+		json.endArray();
+		square("differential", matrix.windings(), (i, j) -> matrix.differential()[i][j]);
+		square("coupling", matrix.windings(),
+				(i, j) -> i == j ? 1 : matrix.coupling(matrix.windings().get(i), matrix.windings().get(j)));
+		square("leakage", matrix.windings(),
+				(i, j) -> i == j ? Double.NaN : matrix.leakage(matrix.windings().get(i), matrix.windings().get(j)));
+		json.endObject();
+	}
+
+	private interface Entry {
+		double at(int row, int column);
+	}
+
+	private void square(String name, List<String> windings, Entry entry) throws IOException {
+		json.name(name).beginArray();
+		for (int i = 0; i < windings.size(); i++) {
 			json.beginArray();
-			for (double entry : row) {
-				json.value(entry);
+			for (int j = 0; j < windings.size(); j++) {
+				value(entry.at(i, j));
 			}
 			json.endArray();
 		}
-		json.endArray().endObject();
+		json.endArray();
 	}
 
 	private void number(String name, double value) throws IOException {
 		json.name(name);
+		value(value);
+	}
+
+	private void value(double value) throws IOException {
 		if (Double.isFinite(value)) {
 			json.value(value);
 		} else {

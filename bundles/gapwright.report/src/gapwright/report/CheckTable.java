@@ -2,8 +2,10 @@ package gapwright.report;
 
 import java.util.Locale;
 
+import gapwright.study.ConnectionResult;
 import gapwright.study.Finding;
 import gapwright.study.GapResult;
+import gapwright.study.LeakageResult;
 import gapwright.study.LegResult;
 import gapwright.study.LegState;
 import gapwright.study.OperatingPointResult;
@@ -74,15 +76,18 @@ public final class CheckTable {
 	}
 
 	private static void windings(StringBuilder text, OperatingPointResult point) {
-		TextTable windings = new TextTable().row("winding", "current", "linkage", "L differential", "L apparent");
+		TextTable windings = new TextTable().row("winding", "current", "swing", "linkage", "L differential", "L apparent",
+				"A_L");
 		for (WindingResult winding : point.windings()) {
-			windings.row(winding.id(), Engineering.of(winding.current(), "A", DIGITS),
+			double swing = winding.highestCurrent() - winding.lowestCurrent();
+			windings.row(winding.id(), Engineering.of(winding.current(), "A", DIGITS), Engineering.of(swing, "A", DIGITS),
 					Engineering.of(winding.linkage(), "Wb", DIGITS),
 					Engineering.of(point.inductance().of(winding.id()), "H", DIGITS),
-					Engineering.of(winding.apparentInductance(), "H", DIGITS));
+					Engineering.of(winding.apparentInductance(), "H", DIGITS),
+					Engineering.of(winding.inductanceFactor(), "H", DIGITS));
 		}
 		windings.appendTo(text, "    ");
-		TextTable pairs = new TextTable().row("windings", "L mutual", "coupling");
+		TextTable pairs = new TextTable().row("windings", "L mutual", "coupling", "leakage of the first");
 		int n = point.windings().size();
 		for (int i = 0; i < n; i++) {
 			for (int j = i + 1; j < n; j++) {
@@ -90,10 +95,24 @@ public final class CheckTable {
 				String second = point.windings().get(j).id();
 				pairs.row(first + ", " + second,
 						Engineering.of(point.inductance().differential()[i][j], "H", DIGITS),
-						String.format(Locale.ROOT, "%.4f", point.inductance().coupling(first, second)));
+						String.format(Locale.ROOT, "%.4f", point.inductance().coupling(first, second)),
+						Engineering.of(point.inductance().leakage(first, second), "H", DIGITS));
 			}
 		}
 		pairs.appendTo(text, "    ");
+		TextTable leakages = new TextTable().row("leakage", "by builds", "short-circuit L", "coupling");
+		for (LeakageResult leakage : point.leakages()) {
+			leakages.row(leakage.id() + " of " + leakage.first() + " to " + leakage.second(),
+					Engineering.of(leakage.inductance(), "H", DIGITS), Engineering.of(leakage.shortCircuit(), "H", DIGITS),
+					String.format(Locale.ROOT, "%.4f", leakage.coupling()));
+		}
+		leakages.appendTo(text, "    ");
+		TextTable connections = new TextTable().row("connection", "joined", "L");
+		for (ConnectionResult connection : point.connections()) {
+			connections.row(connection.id() + ": " + String.join(", ", connection.windings()),
+					connection.series() ? "in series" : "in parallel", Engineering.of(connection.inductance(), "H", DIGITS));
+		}
+		connections.appendTo(text, "    ");
 	}
 
 	private static String tesla(double value) {

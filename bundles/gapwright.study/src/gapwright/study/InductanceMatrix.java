@@ -16,6 +16,22 @@ public record InductanceMatrix(List<String> windings, double[][] differential) {
 		return at < 0 ? Double.NaN : differential[at][at];
 	}
 
+	/** @return H between two windings, differential; NaN when either is not in the matrix */
+	public double mutual(String first, String second) {
+		int i = windings.indexOf(first);
+		int j = windings.indexOf(second);
+		return i < 0 || j < 0 ? Double.NaN : differential[i][j];
+	}
+
+	/**
+	 * @return H, what is left at the first winding when the second is short-circuited, L₁₁ − L₁₂²/L₂₂; loses
+	 *         log₁₀(1/(1 − k²)) digits; NaN when either has no inductance
+	 */
+	public double leakage(String first, String second) {
+		double mutual = mutual(first, second);
+		return of(first) - mutual * mutual / of(second);
+	}
+
 	/** @return coupling coefficient of two windings, -1 to 1; NaN when either has no inductance */
 	public double coupling(String first, String second) {
 		int i = windings.indexOf(first);

@@ -103,10 +103,11 @@ public final class Lowering {
 		}
 		List<StudyInput.PointData> points = new ArrayList<>();
 		for (OperatingPoint point : design.getOperatingPoints()) {
-			points.add(point(point));
+			points.add(point(point, network));
 		}
+		PairLowering pairs = new PairLowering(design, windingIndex, windings, broken, findings);
 		return new StudyInput(design.getName() == null ? "" : design.getName(), near, network, legs, gaps, airPaths,
-				windings, points, findings.list());
+				windings, pairs.leakages(), pairs.connections(), points, findings.list());
 	}
 
 	/** A gap's error is its leg's, a curve's its material's; a coil is judged by its winding, a drive by its point. */
@@ -164,18 +165,20 @@ public final class Lowering {
 		int index = builder.winding();
 		windingIndex.put(winding, index);
 		boolean whole = !broken.contains(winding);
+		int turns = 0;
 		for (Coil coil : winding.getCoils()) {
 			Integer leg = legIndex.get(coil.getLeg());
+			turns += coil.getTurns();
 			if (leg == null || broken.contains(coil)) {
 				whole = false;
 			} else {
 				builder.coil(index, leg, coil.isReversed() ? -coil.getTurns() : coil.getTurns());
 			}
 		}
-		windings.add(new StudyInput.WindingData(id(winding), whole));
+		windings.add(new StudyInput.WindingData(id(winding), whole, turns));
 	}
 
-	private StudyInput.PointData point(OperatingPoint point) {
+	private StudyInput.PointData point(OperatingPoint point, Network network) {
 		double celsius = LegGeometry.si(point.getTemperature());
 		StudyInput.DriveData[] drives = new StudyInput.DriveData[windings.size()];
 		Arrays.fill(drives, StudyInput.DriveData.NONE);
@@ -188,11 +191,10 @@ public final class Lowering {
 				drives[winding] = new StudyInput.DriveData(current.getCurrent().si(), current.getRipple().si(), 0, false);
 			} else if (!broken.contains(drive) && drive instanceof VoltageDrive voltage) {
 				sound &= windings.get(winding).whole();
-				drives[winding] = new StudyInput.DriveData(voltage.getBias().si(), 0,
-						voltage.getVoltage().si() * voltage.getOnTime().si(), true);
+				drives[winding] = new StudyInput.DriveData(voltage.getBias().si(), 0, VoltSeconds.of(voltage), true);
 			}
 		}
-		return new StudyInput.PointData(id(point), celsius, sound ? List.of(drives) : null);
+		return new StudyInput.PointData(id(point), celsius, sound ? List.of(drives) : null, network);
 	}
 
 	static String id(Element element) {

@@ -17,10 +17,21 @@ import java.util.List;
  * @param airPaths     likewise
  * @param windings     likewise
  * @param inductance   of the windings listed
+ * @param leakages     between pairs of windings, in the order of the design, without those that cannot be computed
+ * @param connections  of windings, likewise
  */
 public record OperatingPointResult(String id, boolean converged, int iterations, double fluxResidual, double energy,
 		double coEnergy, List<LegResult> legs, List<GapResult> gaps, List<AirPathResult> airPaths,
-		List<WindingResult> windings, InductanceMatrix inductance) {
+		List<WindingResult> windings, InductanceMatrix inductance, List<LeakageResult> leakages,
+		List<ConnectionResult> connections) {
+
+	/** A point without leakages and connections. */
+	public OperatingPointResult(String id, boolean converged, int iterations, double fluxResidual, double energy,
+			double coEnergy, List<LegResult> legs, List<GapResult> gaps, List<AirPathResult> airPaths,
+			List<WindingResult> windings, InductanceMatrix inductance) {
+		this(id, converged, iterations, fluxResidual, energy, coEnergy, legs, gaps, airPaths, windings, inductance, List.of(),
+				List.of());
+	}
 
 	/** @return the leg with that id, or null */
 	public LegResult leg(String id) {

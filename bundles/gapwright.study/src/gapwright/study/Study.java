@@ -2,8 +2,10 @@ package gapwright.study;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
 
@@ -11,6 +13,7 @@ import gapwright.model.Design;
 import gapwright.model.check.Severity;
 import gapwright.physics.network.Excitation;
 import gapwright.physics.network.ImposedLinkagesConflictException;
+import gapwright.physics.network.Network;
 import gapwright.physics.network.NetworkSolver;
 import gapwright.physics.network.Solution;
 
@@ -22,14 +25,13 @@ public final class Study {
 
 	private final StudyInput input;
 	private final BooleanSupplier cancelled;
-	private final NetworkSolver solver;
+	private final Map<Network, NetworkSolver> solvers = new IdentityHashMap<>();
 	private final Findings findings = new Findings();
 	private Solution warm;
 
 	private Study(StudyInput input, BooleanSupplier cancelled) {
 		this.input = input;
 		this.cancelled = cancelled;
-		solver = new NetworkSolver(input.network);
 		input.findings.forEach(findings::add);
 	}
 
@@ -71,11 +73,13 @@ public final class Study {
 	private OperatingPointResult solve(StudyInput.PointData point) {
 		int windings = input.windings.size();
 		double[] mean = point.drives().stream().mapToDouble(StudyInput.DriveData::meanCurrent).toArray();
-		Solution atMean = solve(Excitation.currents(mean));
+		Solution atMean = solve(point, Excitation.currents(mean));
 		if (!atMean.converged()) {
 			return notConverged(point, atMean);
 		}
 		double[] peak = absolute(atMean.legFluxDensity());
+		double[] lowest = atMean.windingCurrent().clone();
+		double[] highest = lowest.clone();
 		boolean swings = point.drives().stream().anyMatch(d -> d.ripple() != 0 || d.linkageSwing() != 0);
 		for (int sign = -1; sign <= 1 && swings; sign += 2) {
 			double[] current = new double[windings];
@@ -87,7 +91,7 @@ public final class Study {
 			}
 			Solution end;
 			try {
-				end = solve(Excitation.mixed(current, linkage));
+				end = solve(point, Excitation.mixed(current, linkage));
 			} catch (ImposedLinkagesConflictException e) {
 				findings.add(new Finding(Severity.ERROR, "imposed-linkages-conflict",
 						input.windings.get(e.winding()).id(), point.id(),
@@ -102,14 +106,19 @@ public final class Study {
 			for (int k = 0; k < peak.length; k++) {
 				peak[k] = Math.max(peak[k], there[k]);
 			}
+			for (int w = 0; w < windings; w++) {
+				lowest[w] = Math.min(lowest[w], end.windingCurrent()[w]);
+				highest[w] = Math.max(highest[w], end.windingCurrent()[w]);
+			}
 		}
-		return result(point, atMean, peak);
+		return result(point, atMean, peak, lowest, highest);
 	}
 
-	private Solution solve(Excitation excitation) {
+	private Solution solve(StudyInput.PointData point, Excitation excitation) {
 		if (cancelled.getAsBoolean()) {
 			throw new CancellationException();
 		}
+		NetworkSolver solver = solvers.computeIfAbsent(point.network(), NetworkSolver::new);
 		Solution solution = warm == null ? solver.solve(excitation) : solver.solve(excitation, warm);
 		if (solution.converged()) {
 			warm = solution;
@@ -134,7 +143,8 @@ public final class Study {
 				List.of(), List.of(), List.of(), new InductanceMatrix(List.of(), new double[0][]));
 	}
 
-	private OperatingPointResult result(StudyInput.PointData point, Solution s, double[] peak) {
+	private OperatingPointResult result(StudyInput.PointData point, Solution s, double[] peak, double[] lowest,
+			double[] highest) {
 		LegJudge judge = new LegJudge(input, point, findings);
 		List<LegResult> legs = new ArrayList<>();
 		for (int k = 0; k < input.legs.size(); k++) {
@@ -159,8 +169,10 @@ public final class Study {
 			whole.add(w);
 			double current = s.windingCurrent()[w];
 			boolean alone = carrying == 1 && current != 0 && !input.network.hasMagnets();
+			double turns = input.windings.get(w).turns();
 			windings.add(new WindingResult(input.windings.get(w).id(), current, s.linkage()[w],
-					alone ? s.linkage()[w] / current : Double.NaN));
+					alone ? s.linkage()[w] / current : Double.NaN, lowest[w], highest[w],
+					s.differentialInductance()[w][w] / (turns * turns)));
 		}
 		double[][] inductance = new double[whole.size()][whole.size()];
 		for (int i = 0; i < whole.size(); i++) {
@@ -169,8 +181,9 @@ public final class Study {
 			}
 		}
 		List<String> ids = windings.stream().map(WindingResult::id).toList();
+		Pairs pairs = new Pairs(input, point.id(), s, findings);
 		return new OperatingPointResult(point.id(), true, s.iterations(), s.fluxResidual(), s.energy(), s.coEnergy(),
 				List.copyOf(legs), List.copyOf(gaps), List.copyOf(airPaths), List.copyOf(windings),
-				new InductanceMatrix(ids, inductance));
+				new InductanceMatrix(ids, inductance), pairs.leakages(), pairs.connections());
 	}
 }

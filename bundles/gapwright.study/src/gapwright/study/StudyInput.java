@@ -1,9 +1,11 @@
 package gapwright.study;
 
 import java.util.List;
+import java.util.stream.IntStream;
 
 import gapwright.physics.gap.Fringing;
 import gapwright.physics.gap.GapGeometry;
+import gapwright.physics.leakage.WindingPair;
 import gapwright.physics.network.Network;
 
 /**
@@ -13,7 +15,7 @@ import gapwright.physics.network.Network;
 public final class StudyInput {
 
 	/** What is judged about a leg; index is the network's. */
-	record LegData(String id, SaturationData saturation, String material) {
+	public record LegData(String id, SaturationData saturation, String material) {
 	}
 
 	/**
@@ -23,7 +25,7 @@ public final class StudyInput {
 	 *                  distance does not depend on a leg's width
 	 * @param secondBar likewise towards the other end
 	 */
-	record GapData(String id, String leg, int legIndex, Fringing method, GapGeometry geometry, String firstBar,
+	public record GapData(String id, String leg, int legIndex, Fringing method, GapGeometry geometry, String firstBar,
 			String secondBar) {
 
 		double permeance() {
@@ -36,17 +38,31 @@ public final class StudyInput {
 	}
 
 	/** How a winding is driven at a point. Mean and ripple for a current; bias and swing for a voltage. */
-	record DriveData(double meanCurrent, double ripple, double linkageSwing, boolean imposesLinkage) {
+	public record DriveData(double meanCurrent, double ripple, double linkageSwing, boolean imposesLinkage) {
 
 		static final DriveData NONE = new DriveData(0, 0, 0, false);
 	}
 
-	/** @param drives one per winding of the network; null when the point cannot be computed */
-	record PointData(String id, double celsius, List<DriveData> drives) {
+	/**
+	 * @param drives  one per winding of the network; null when the point cannot be computed
+	 * @param network at this temperature; the same for all points where no curve depends on it
+	 */
+	public record PointData(String id, double celsius, List<DriveData> drives, Network network) {
 	}
 
-	/** @param whole whether all its coils are in the network, so that its linkage is known */
-	record WindingData(String id, boolean whole) {
+	/**
+	 * @param whole whether all its coils are in the network, so that its linkage is known
+	 * @param turns of all coils, whatever their sense
+	 */
+	public record WindingData(String id, boolean whole, int turns) {
+	}
+
+	/** Leakage of two windings, by their index; the pair is null where its sizes make no sense. */
+	public record LeakageData(String id, int first, int second, WindingPair pair) {
+	}
+
+	/** Windings joined, by their index, each with its sense, 1 or −1. */
+	public record ConnectionData(String id, boolean series, int[] windings, int[] senses) {
 	}
 
 	final String design;
@@ -56,11 +72,14 @@ public final class StudyInput {
 	final List<GapData> gaps;
 	final List<String> airPaths;
 	final List<WindingData> windings;
+	final List<LeakageData> leakages;
+	final List<ConnectionData> connections;
 	final List<PointData> points;
 	final List<Finding> findings;
 
 	StudyInput(String design, double nearFraction, Network network, List<LegData> legs, List<GapData> gaps,
-			List<String> airPaths, List<WindingData> windings, List<PointData> points, List<Finding> findings) {
+			List<String> airPaths, List<WindingData> windings, List<LeakageData> leakages, List<ConnectionData> connections,
+			List<PointData> points, List<Finding> findings) {
 		this.design = design;
 		this.nearFraction = nearFraction;
 		this.network = network;
@@ -68,8 +87,68 @@ public final class StudyInput {
 		this.gaps = List.copyOf(gaps);
 		this.airPaths = List.copyOf(airPaths);
 		this.windings = List.copyOf(windings);
+		this.leakages = List.copyOf(leakages);
+		this.connections = List.copyOf(connections);
 		this.points = List.copyOf(points);
 		this.findings = List.copyOf(findings);
+	}
+
+	public String design() {
+		return design;
+	}
+
+	/** @return of saturation, from which on a leg is near it */
+	public double nearFraction() {
+		return nearFraction;
+	}
+
+	public List<LegData> legs() {
+		return legs;
+	}
+
+	public List<GapData> gaps() {
+		return gaps;
+	}
+
+	/** @return ids, in the network's order */
+	public List<String> airPaths() {
+		return airPaths;
+	}
+
+	public List<WindingData> windings() {
+		return windings;
+	}
+
+	public List<PointData> points() {
+		return points;
+	}
+
+	/** @return the operating point with that id, or null */
+	public PointData point(String id) {
+		return points.stream().filter(point -> point.id().equals(id)).findFirst().orElse(null);
+	}
+
+	/** @return index of the winding with that id, or -1 */
+	public int winding(String id) {
+		return IntStream.range(0, windings.size()).filter(w -> windings.get(w).id().equals(id)).findFirst().orElse(-1);
+	}
+
+	/** @return largest magnitude of a winding's current at any operating point, ripple included, A; 0 when it is never driven */
+	public double largestCurrent(String winding) {
+		int w = winding(winding);
+		double largest = 0;
+		for (PointData point : points) {
+			if (w >= 0 && point.drives() != null) {
+				DriveData drive = point.drives().get(w);
+				largest = Math.max(largest, Math.abs(drive.meanCurrent()) + drive.ripple() / 2);
+			}
+		}
+		return largest;
+	}
+
+	/** @return what lowering the design found */
+	public List<Finding> findings() {
+		return findings;
 	}
 
 	/** @return legs and air paths that will be computed with; a measure of the work */

@@ -7,6 +7,15 @@ package gapwright.study;
  * @param current            A
  * @param linkage            Wb
  * @param apparentInductance H, linkage/current; NaN unless it alone carries current and no magnet acts
+ * @param lowestCurrent      A, at one end of the ripple or voltage swing
+ * @param highestCurrent     A, at the other end
+ * @param inductanceFactor   H per turn², A_L: differential inductance over the square of all its turns
  */
-public record WindingResult(String id, double current, double linkage, double apparentInductance) {
+public record WindingResult(String id, double current, double linkage, double apparentInductance, double lowestCurrent,
+		double highestCurrent, double inductanceFactor) {
+
+	/** A winding without ripple, its A_L unknown. */
+	public WindingResult(String id, double current, double linkage, double apparentInductance) {
+		this(id, current, linkage, apparentInductance, current, current, Double.NaN);
+	}
 }

@@ -231,4 +231,31 @@ class MainTest {
 		assertTrue(told.contains("a fault of this program") && told.contains("no paper"), told);
 		assertFalse(told.contains("\tat "), told);
 	}
+
+	@Test
+	void aSweepGivesInductanceAgainstCurrentInThreeForms() throws IOException {
+		String file = example(NEAR);
+		assertEquals(2, run("sweep", file, "--to", "60 A", "--steps", "6"));
+		assertTrue(out.contains("L differential") && out.contains("over from"), out);
+		assertEquals(2, run("sweep", file, "--to", "60 A", "--steps", "6", "--csv"));
+		assertEquals(8, out.lines().count());
+		assertTrue(out.startsWith("current_A,linkage_Wb,"), out);
+		assertEquals(2, run("sweep", file, "--to", "60 A", "--steps", "6", "--json"));
+		JsonObject json = JsonParser.parseString(out).getAsJsonObject();
+		assertEquals(7, json.getAsJsonArray("current").size());
+		assertEquals(60, json.getAsJsonArray("current").get(6).getAsDouble(), 0);
+		assertEquals("", err);
+	}
+
+	@Test
+	void aSweepThatMakesNoSenseIsRefusedInWords() throws IOException {
+		String file = example(NEAR);
+		assertEquals(65, run("sweep", file, "--winding", "none"));
+		assertEquals(file + ":: there is no winding 'none'\n", err.replace("\r", ""));
+		assertEquals(64, run("sweep", file, "--to", "60"));
+		assertTrue(err.startsWith("gapwright: sweep: --to '60': a current needs a unit, e.g. 14 A"), err);
+		assertEquals(64, run("sweep", file, "--steps", "0"));
+		assertEquals(64, run("sweep", file, "--steps"));
+		assertEquals(64, run("sweep", "--to", "1 A"));
+	}
 }

@@ -1,0 +1,14 @@
+package gapwright.study;
+
+import java.util.List;
+
+/**
+ * Windings joined to one pair of terminals, for small changes about the operating point.
+ *
+ * @param id         of the connection
+ * @param series     in series, else in parallel
+ * @param windings   ids, in the order joined
+ * @param inductance H, at the terminals; NaN where the windings cannot be joined so
+ */
+public record ConnectionResult(String id, boolean series, List<String> windings, double inductance) {
+}

@@ -1,0 +1,134 @@
+package gapwright.study;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertNull;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+
+import org.junit.jupiter.api.Test;
+
+/** What the inductance matrix says about windings, and what volt-seconds do. */
+class InductanceTest {
+
+	private static final String END = "</gapwright:Design>";
+	private static final String TWIN = "<windings id=\"twin\"><coils id=\"twin-coil\" leg=\"wound\" turns=\"20\"/></windings>";
+	private static final String OTHER = "<windings id=\"other\"><coils id=\"other-coil\" leg=\"back\" turns=\"5\"/></windings>";
+	private static final String AIR = "<airPaths id=\"air\" from=\"a\" to=\"b\" permeance=\"40 nH\"/>";
+
+	private static OperatingPointResult point(StudyResult result) {
+		return result.operatingPoints().get(0);
+	}
+
+	private static String connection(String kind, String... members) {
+		StringBuilder text = new StringBuilder("<connections id=\"joined\" kind=\"" + kind + "\">");
+		for (String member : members) {
+			text.append("<members winding=\"").append(member.replace("-", "")).append('"')
+					.append(member.startsWith("-") ? " reversed=\"true\"" : "").append("/>");
+		}
+		return text + "</connections>";
+	}
+
+	private static double joined(String... changes) {
+		return point(Designs.study(changes)).connections().get(0).inductance();
+	}
+
+	/** Two windings with all flux in common: 4L aiding, 0 opposing, L in parallel. Elementary. */
+	@Test
+	void perfectlyCoupledTwinsJoinAsOneWindingOfTwiceTheTurns() {
+		double own = point(Designs.study()).inductance().of("main");
+		assertEquals(4 * own, joined(END, TWIN + connection("SERIES", "main", "twin") + END), 1e-10 * own);
+		assertEquals(0, joined(END, TWIN + connection("SERIES", "main", "-twin") + END), 1e-10 * own);
+		assertEquals(own, joined(END, TWIN + connection("PARALLEL", "main", "twin") + END), 1e-9 * own);
+	}
+
+	/** With the mutual inductance M: L₁ + L₂ ± 2M in series, (L₁L₂ − M²)/(L₁ + L₂ ∓ 2M) in parallel. Textbook. */
+	@Test
+	void partlyCoupledWindingsJoinByTheTextbook() {
+		String air = AIR + OTHER;
+		OperatingPointResult p = point(Designs.study("  <windings", AIR + "  <windings", END, OTHER + END));
+		double l1 = p.inductance().of("main");
+		double l2 = p.inductance().of("other");
+		double m = p.inductance().mutual("main", "other");
+		assertTrue(m != 0 && air.length() > 0);
+		String[] base = { "  <windings", AIR + "  <windings", END, "" };
+		base[3] = OTHER + connection("SERIES", "main", "other") + END;
+		assertEquals(l1 + l2 + 2 * m, joined(base), 1e-10 * l1);
+		base[3] = OTHER + connection("SERIES", "main", "-other") + END;
+		assertEquals(l1 + l2 - 2 * m, joined(base), 1e-10 * l1);
+		base[3] = OTHER + connection("PARALLEL", "main", "other") + END;
+		assertEquals((l1 * l2 - m * m) / (l1 + l2 - 2 * m), joined(base), 1e-10 * l1);
+		base[3] = OTHER + connection("PARALLEL", "main", "-other") + END;
+		assertEquals((l1 * l2 - m * m) / (l1 + l2 + 2 * m), joined(base), 1e-10 * l1);
+		double k = p.inductance().coupling("main", "other");
+		assertEquals(l1 * (1 - k * k), p.inductance().leakage("main", "other"), 1e-9 * l1);
+	}
+
+	@Test
+	void unequalTurnsInParallelRoundOneLegAreRefused() {
+		StudyResult result = Designs.study(END, TWIN.replace("\"20\"", "\"19\"") + connection("PARALLEL", "main", "twin") + END);
+		assertTrue(point(result).connections().isEmpty());
+		assertTrue(result.findings().stream().anyMatch(f -> f.code().equals("unequal-parallel-turns") && f.subject().equals("joined")));
+		assertTrue(point(result).converged());
+	}
+
+	/** Energy method for builds of 3 and 3 mm, 0.5 mm apart, 30 mm high, mean turn 80 mm, 20 turns: 3.1199 µH by hand. */
+	@Test
+	void leakageOfTwoWindingsComesFromTheirBuildsAndLowersTheirCoupling() {
+		OperatingPointResult p = point(Designs.study(END, TWIN + "<leakages id=\"between\" first=\"main\" second=\"twin\""
+				+ " firstBuild=\"3 mm\" secondBuild=\"3 mm\" separation=\"0.5 mm\" height=\"30 mm\" meanTurn=\"80 mm\"/>" + END));
+		LeakageResult leakage = p.leakages().get(0);
+		assertEquals(3.1199e-6, leakage.inductance(), 5e-11);
+		assertEquals(leakage.inductance(), leakage.shortCircuit(), 1e-18);
+		double l = p.inductance().of("main");
+		assertEquals(leakage.shortCircuit(), (l + leakage.inductance()) * (1 - leakage.coupling() * leakage.coupling()), 1e-12 * l);
+	}
+
+	@Test
+	void leakageOutsideItsFormulaIsSaid() {
+		String flat = "<leakages id=\"between\" first=\"main\" second=\"twin\" firstBuild=\"9 mm\" secondBuild=\"9 mm\""
+				+ " separation=\"0 mm\" height=\"10 mm\" meanTurn=\"80 mm\"/>";
+		StudyResult doubtful = Designs.study(END, TWIN + flat + END);
+		assertTrue(doubtful.findings().stream().anyMatch(f -> f.code().equals("leakage-outside-validity")));
+		StudyResult refused = Designs.study(END, TWIN + flat.replace("10 mm", "8 mm") + END);
+		assertTrue(refused.findings().stream().anyMatch(f -> f.code().equals("leakage-refused")));
+		assertTrue(point(refused).leakages().isEmpty());
+	}
+
+	@Test
+	void inductanceFactorIsInductancePerTurnSquared() {
+		OperatingPointResult p = point(Designs.study());
+		assertEquals(p.inductance().of("main") / 400, p.winding("main").inductanceFactor(), 1e-18);
+	}
+
+	private static WindingResult pulse(String voltage, String time, String waveform) {
+		String drive = "<drives xsi:type=\"gapwright:CurrentDrive\" id=\"drive\" winding=\"main\" current=\"10 A\" ripple=\"4 A\"/>";
+		return point(Designs.study(drive, "<drives xsi:type=\"gapwright:VoltageDrive\" id=\"drive\" winding=\"main\" voltage=\"" + voltage
+				+ "\" onTime=\"" + time + "\" bias=\"10 A\" waveform=\"" + waveform + "\"/>")).winding("main");
+	}
+
+	/**
+	 * Faraday: pulses of equal volt-seconds swing the current alike, whatever their shape: V·t, V·t/2, 2·V·t/π. For a
+	 * small swing the current moves by V·t/L.
+	 */
+	@Test
+	void pulsesOfEqualVoltSecondsSwingTheCurrentAlike() {
+		WindingResult rectangular = pulse("10 V", "1 µs", "RECTANGULAR");
+		WindingResult triangular = pulse("20 V", "1 µs", "TRIANGULAR");
+		WindingResult sinusoidal = pulse("10 V", "1.5707963267948966 µs", "SINUSOIDAL");
+		double swing = rectangular.highestCurrent() - rectangular.lowestCurrent();
+		assertEquals(swing, triangular.highestCurrent() - triangular.lowestCurrent(), 1e-9 * swing);
+		assertEquals(swing, sinusoidal.highestCurrent() - sinusoidal.lowestCurrent(), 1e-9 * swing);
+		double l = point(Designs.study()).inductance().of("main");
+		assertEquals(10 * 1e-6 / l, swing, 1e-3 * swing);
+		assertEquals(10, rectangular.current(), 0);
+	}
+
+	@Test
+	void aDeepSwingNeedsMoreCurrentOnTheSaturatedSide() {
+		WindingResult deep = pulse("100 V", "10 µs", "RECTANGULAR");
+		assertTrue(deep.highestCurrent() - 10 > 10 - deep.lowestCurrent());
+		assertNull(point(Designs.study()).winding("twin"));
+		assertEquals(List.of(), point(Designs.study()).connections());
+	}
+}
