@@ -18,6 +18,11 @@ public record ArctanBh(double initialPermeability, double saturationPolarisation
 		Domain.above(0, "saturationPolarisation", saturationPolarisation);
 	}
 
+	@Override
+	public ArctanBh with(double permeability, double polarisationRatio) {
+		return new ArctanBh(permeability, Domain.above(0, "polarisationRatio", polarisationRatio) * saturationPolarisation);
+	}
+
 	private double chi() {
 		return MU_0 * (initialPermeability - 1);
 	}

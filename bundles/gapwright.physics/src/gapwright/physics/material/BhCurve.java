@@ -34,6 +34,23 @@ public interface BhCurve {
 	double coEnergyDensity(double fieldStrength);
 
 	/**
+	 * The same material in another state: its polarisation at saturation multiplied, its initial permeability replaced.
+	 * The polarisation keeps its shape, J(H) becomes r·J(k·H).
+	 *
+	 * @param initialPermeability relative, in the curve's own domain
+	 * @param polarisationRatio   r, &gt; 0; without effect on a curve that has no saturation
+	 * @throws IllegalArgumentException when a parameter is outside its domain or the curve would no longer rise
+	 */
+	BhCurve with(double initialPermeability, double polarisationRatio);
+
+	/**
+	 * Field strengths, A/m, rising and above 0, between which the curve is smooth; none where it is smooth everywhere.
+	 */
+	default double[] corners() {
+		return new double[0];
+	}
+
+	/**
 	 * The inverse of {@link #fluxDensity}, by bracketed Newton steps to rounding.
 	 *
 	 * @param fluxDensity B, T, finite

@@ -36,6 +36,11 @@ public record KneeBh(double initialPermeability, double saturationPolarisation) 
 		return new KneeBh(initialPermeability, polarisation * unsaturated / (unsaturated - polarisation));
 	}
 
+	@Override
+	public KneeBh with(double permeability, double polarisationRatio) {
+		return new KneeBh(permeability, Domain.above(0, "polarisationRatio", polarisationRatio) * saturationPolarisation);
+	}
+
 	private double chi() {
 		return MU_0 * (initialPermeability - 1);
 	}

@@ -13,6 +13,11 @@ public record LinearBh(double relativePermeability) implements BhCurve {
 	}
 
 	@Override
+	public LinearBh with(double permeability, double polarisationRatio) {
+		return new LinearBh(permeability);
+	}
+
+	@Override
 	public double fluxDensity(double h) {
 		return MU_0 * relativePermeability * h;
 	}

@@ -28,6 +28,28 @@ public record RollOffBh(double initialPermeability, double halfFieldStrength, do
 		Domain.above(1, "exponent", exponent);
 	}
 
+	/**
+	 * The curve of a maker's fit of per cent initial permeability against bias, 1/(a + b·H^c).
+	 *
+	 * @param initialPermeability µi, relative, &gt; 1
+	 * @param a                   &gt; 0; 0.01 in the usual fit, where no bias leaves 100 per cent
+	 * @param b                   &gt; 0; for H in A/m. A fit for oersted has 79.5775^c times as much
+	 * @param exponent            c, &gt; 1
+	 * @throws IllegalArgumentException when a parameter is outside its domain
+	 */
+	public static RollOffBh ofPerCentFit(double initialPermeability, double a, double b, double exponent) {
+		double ratio = Domain.above(0, "a", a) / Domain.above(0, "b", b);
+		return new RollOffBh(initialPermeability, Math.pow(ratio, 1 / Domain.above(1, "exponent", exponent)), exponent);
+	}
+
+	/** The exponent stays; the half field strength follows, so that the limiting polarisation is what is asked for. */
+	@Override
+	public RollOffBh with(double permeability, double polarisationRatio) {
+		double initial = Domain.above(1, "initialPermeability", permeability);
+		return new RollOffBh(initial, halfFieldStrength * Domain.above(0, "polarisationRatio", polarisationRatio)
+				* (initialPermeability - 1) / (initial - 1), exponent);
+	}
+
 	private double chi() {
 		return MU_0 * (initialPermeability - 1);
 	}

@@ -185,6 +185,38 @@ public final class TableBh implements BhCurve {
 		return x;
 	}
 
+	/** @throws IllegalArgumentException also when a piece that rises slower than air would fall */
+	@Override
+	public TableBh with(double initialPermeability, double polarisationRatio) {
+		Domain.above(0, "polarisationRatio", polarisationRatio);
+		double faster = (Domain.above(1, "initialPermeability", initialPermeability) - 1) / (initialPermeability() - 1);
+		if (!(faster > 0)) {
+			throw new IllegalArgumentException("the table begins no steeper than air: it has no permeability to change");
+		}
+		double[] field = new double[h.length];
+		double[] flux = new double[h.length];
+		for (int i = 1; i < h.length; i++) {
+			field[i] = h[i] * polarisationRatio / faster;
+			flux[i] = polarisationRatio * (b[i] - MU_0 * h[i]) + MU_0 * field[i];
+		}
+		return new TableBh(field, flux);
+	}
+
+	private double initialPermeability() {
+		return d[0] / MU_0;
+	}
+
+	@Override
+	public double[] corners() {
+		return Arrays.copyOfRange(h, 1, h.length);
+	}
+
+	/** @return relative slope of the last piece's secant: near 1 where the table ends saturated */
+	public double endPermeability() {
+		int last = h.length - 1;
+		return (b[last] - b[last - 1]) / (h[last] - h[last - 1]) / MU_0;
+	}
+
 	/** @return number of points, the origin included */
 	public int size() {
 		return h.length;
