@@ -37,13 +37,13 @@ final class LegJudge {
 			add(Severity.WARNING, Findings.NEAR, leg.id(), reached(peak, utilisation, saturation) + ", near is from "
 					+ Figures.perCent(input.nearFraction), "");
 		}
-		if (leg.saturation().isOutside(point.celsius()) && outside.add(leg.material())) {
-			add(Severity.NOTE, "temperature-outside-data", leg.material(),
+		if (leg.saturation().isOutside(point.celsius()) && outside.add(leg.material().id())) {
+			add(Severity.NOTE, "temperature-outside-data", leg.material().id(),
 					"saturation is given from " + leg.saturation().range()
 							+ "; its end value is used at " + Figures.of(point.celsius()) + " °C",
 					"Add a saturation at this temperature.");
 		}
-		if (input.network.curve(k) instanceof TableBh table) {
+		if (point.network().curve(k) instanceof TableBh table) {
 			tableEnd(table, leg, peak);
 		}
 		return new LegResult(leg.id(), s.legFlux()[k], s.legFluxDensity()[k], s.legFieldStrength()[k],

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -30,6 +31,7 @@ import gapwright.model.check.Problem;
 import gapwright.model.check.Severity;
 import gapwright.physics.material.BhCurve;
 import gapwright.physics.network.Network;
+import gapwright.physics.network.NetworkValues;
 
 /**
  * Lowers a design to plain numbers. An element with an error takes its whole island out of the network, because every
@@ -42,7 +44,9 @@ public final class Lowering {
 	private final Design design;
 	private final Findings findings = new Findings();
 	private final Set<EObject> broken = new HashSet<>();
-	private final Map<Material, BhCurve> curves = new HashMap<>();
+	private final Map<Material, MaterialData> materials = new HashMap<>();
+	private final List<MaterialData> legMaterials = new ArrayList<>();
+	private final Map<Double, Network> networks = new HashMap<>();
 	private final Network.Builder builder = Network.builder();
 	private final Map<Joint, Integer> joints = new HashMap<>();
 	private final Map<Leg, Integer> legIndex = new HashMap<>();
@@ -123,9 +127,9 @@ public final class Lowering {
 				continue;
 			}
 			try {
-				BhCurve curve = MaterialLowering.curve(material.getCurve());
-				curves.put(material, curve);
-				MaterialFindings.add(material, curve, findings);
+				MaterialData data = new MaterialData(material);
+				materials.put(material, data);
+				MaterialFindings.add(material, data, data.curve(data.curveCelsius()), findings);
 			} catch (IllegalArgumentException e) {
 				findings.error("value-out-of-domain", id(material), e.getMessage(), "");
 				broken.add(material);
@@ -146,10 +150,12 @@ public final class Lowering {
 					"whether the field opposing the magnet demagnetises it is not checked: the material gives no knee",
 					"Check the maker's demagnetisation curve at the highest temperature.");
 		}
-		int index = builder.leg(joints.get(leg.getFrom()), joints.get(leg.getTo()), curves.get(leg.getMaterial()),
+		MaterialData data = materials.get(leg.getMaterial());
+		int index = builder.leg(joints.get(leg.getFrom()), joints.get(leg.getTo()), data.curve(data.curveCelsius()),
 				Math.max(0, LegGeometry.ironLength(leg)), gross * leg.getStackingFactor(), reluctance, mmf);
 		legIndex.put(leg, index);
-		legs.add(new StudyInput.LegData(id(leg), new SaturationData(leg.getMaterial()), id(leg.getMaterial())));
+		legs.add(new StudyInput.LegData(id(leg), data));
+		legMaterials.add(data);
 		gaps.addAll(gapLowering.data(leg, index));
 	}
 
@@ -194,7 +200,37 @@ public final class Lowering {
 				drives[winding] = new StudyInput.DriveData(voltage.getBias().si(), 0, VoltSeconds.of(voltage), true);
 			}
 		}
-		return new StudyInput.PointData(id(point), celsius, sound ? List.of(drives) : null, network);
+		for (MaterialData material : new LinkedHashSet<>(legMaterials)) {
+			sound &= Double.isNaN(celsius) || MaterialFindings.addAt(material, id(point), celsius, findings);
+			sound &= Double.isNaN(celsius) || hasCurve(material, id(point), celsius);
+		}
+		return new StudyInput.PointData(id(point), celsius, sound ? List.of(drives) : null, sound ? at(celsius, network) : network);
+	}
+
+	private boolean hasCurve(MaterialData material, String point, double celsius) {
+		try {
+			material.curve(celsius);
+			return true;
+		} catch (IllegalArgumentException e) {
+			findings.add(new Finding(Severity.ERROR, "value-out-of-domain", material.id(), point,
+					"at " + Figures.of(celsius) + " °C its curve would have " + e.getMessage(), ""));
+			return false;
+		}
+	}
+
+	/** @return the network with every curve at that temperature; the same one where no curve depends on it */
+	private Network at(double celsius, Network network) {
+		if (legMaterials.stream().noneMatch(MaterialData::dependsOnTemperature)) {
+			return network;
+		}
+		return networks.computeIfAbsent(celsius, key -> {
+			Map<MaterialData, BhCurve> curves = new HashMap<>();
+			NetworkValues values = network.values();
+			for (int k = 0; k < values.curve.length; k++) {
+				values.curve[k] = curves.computeIfAbsent(legMaterials.get(k), material -> material.curve(celsius));
+			}
+			return network.with(values);
+		});
 	}
 
 	static String id(Element element) {

@@ -15,7 +15,11 @@ import gapwright.physics.network.Network;
 public final class StudyInput {
 
 	/** What is judged about a leg; index is the network's. */
-	public record LegData(String id, SaturationData saturation, String material) {
+	public record LegData(String id, MaterialData material) {
+
+		public SaturationData saturation() {
+			return material.saturation();
+		}
 	}
 
 	/**

@@ -69,8 +69,41 @@ public final class Network {
 		magnets = Arrays.stream(magnetMmf).anyMatch(mmf -> mmf != 0);
 	}
 
+	/** The structure of another network with other numbers. */
+	private Network(Network like, NetworkValues values) {
+		joints = like.joints;
+		windings = like.windings;
+		from = like.from;
+		to = like.to;
+		curve = values.curve.clone();
+		pathLength = values.pathLength.clone();
+		ironArea = values.ironArea.clone();
+		seriesReluctance = values.seriesReluctance.clone();
+		magnetMmf = values.magnetMmf.clone();
+		permeance = values.permeance.clone();
+		coilWinding = like.coilWinding;
+		coilLeg = like.coilLeg;
+		coilTurns = values.coilTurns.clone();
+		magnets = Arrays.stream(magnetMmf).anyMatch(mmf -> mmf != 0);
+	}
+
 	public static Builder builder() {
 		return new Builder();
+	}
+
+	/** @return a copy of all numbers, to be changed and given to {@link #with} */
+	public NetworkValues values() {
+		return new NetworkValues(curve.clone(), pathLength.clone(), ironArea.clone(), seriesReluctance.clone(),
+				magnetMmf.clone(), permeance.clone(), coilTurns.clone());
+	}
+
+	/**
+	 * @return a network alike in structure with those numbers
+	 * @throws IllegalArgumentException naming the number, what was found and what is allowed
+	 */
+	public Network with(NetworkValues values) {
+		values.check(legCount(), airPathCount(), coilCount());
+		return new Network(this, values);
 	}
 
 	public int jointCount() {
