@@ -4,6 +4,9 @@ import java.util.HashSet;
 import java.util.Set;
 
 import gapwright.model.check.Severity;
+import gapwright.physics.material.BhCurve;
+import gapwright.physics.material.BlendedBh;
+import gapwright.physics.material.StretchedBh;
 import gapwright.physics.material.TableBh;
 import gapwright.physics.network.Solution;
 
@@ -43,9 +46,7 @@ final class LegJudge {
 							+ "; its end value is used at " + Figures.of(point.celsius()) + " °C",
 					"Add a saturation at this temperature.");
 		}
-		if (point.network().curve(k) instanceof TableBh table) {
-			tableEnd(table, leg, peak);
-		}
+		tableEnd(point.network().curve(k), leg, peak);
 		return new LegResult(leg.id(), s.legFlux()[k], s.legFluxDensity()[k], s.legFieldStrength()[k],
 				s.legMmfDrop()[k], saturation, peak, utilisation, state);
 	}
@@ -55,16 +56,25 @@ final class LegJudge {
 				+ Figures.of(saturation) + " T at " + Figures.of(point.celsius()) + " °C";
 	}
 
-	private void tableEnd(TableBh table, StudyInput.LegData leg, double peak) {
-		int last = table.size() - 1;
-		double secant = (table.fluxDensityAt(last) - table.fluxDensityAt(last - 1))
-				/ (table.fieldStrengthAt(last) - table.fieldStrengthAt(last - 1));
-		if (peak > table.fluxDensityAt(last) && secant > NOT_SATURATED * TableBh.MU_0) {
+	private void tableEnd(BhCurve curve, StudyInput.LegData leg, double peak) {
+		if (endsTooSoon(curve, peak)) {
 			add(Severity.NOTE, "table-end-not-saturated", leg.id(),
 					"the flux density lies beyond the last point of the table, which still rises steeply there;"
 							+ " beyond it the flux density reads low",
 					"Add points nearer to saturation.");
 		}
+	}
+
+	/** Whether a table, or one behind the curve, ends below the flux density and steeply. */
+	private static boolean endsTooSoon(BhCurve curve, double fluxDensity) {
+		if (curve instanceof BlendedBh blended) {
+			return endsTooSoon(blended.first(), fluxDensity) || endsTooSoon(blended.second(), fluxDensity);
+		}
+		if (curve instanceof StretchedBh stretched) {
+			return endsTooSoon(stretched.base(), fluxDensity);
+		}
+		return curve instanceof TableBh table && fluxDensity > table.fluxDensityAt(table.size() - 1)
+				&& table.endPermeability() > NOT_SATURATED;
 	}
 
 	private void add(Severity severity, String code, String subject, String message, String hint) {

@@ -13,13 +13,14 @@ import gapwright.model.Material;
 import gapwright.physics.material.BhCurve;
 import gapwright.physics.material.BlendedBh;
 import gapwright.physics.material.CurveChange;
+import gapwright.physics.material.LinearBh;
 
 /**
  * A material lowered to numbers: its curve and its saturation at any temperature.
  * <p>
  * With several curves the field strength is interpolated at each flux density, the end curve outside. Permeabilities
  * given by temperature replace that of the curve. Where the curve scales with saturation, its polarisation goes as the
- * saturations given: Js(T) = Js·Bs(T)/Bs(temperature of the curve).
+ * saturations given: J(T) = J·Bs(T)/Bs(temperature of the curve), from the end curve on where several are given.
  */
 public final class MaterialData {
 
@@ -80,21 +81,31 @@ public final class MaterialData {
 
 	/** @return whether the curve is another at another temperature */
 	public boolean dependsOnTemperature() {
-		return curves.size() > 1 || !permeability.isEmpty() || scales();
+		return curves.size() > 1 || !permeability.isEmpty() || followsSaturation();
 	}
 
-	/** @return whether the curve's saturation follows the saturations given */
+	/** @return whether a change of saturation at one temperature, as by a tolerance, changes the curve */
 	public boolean scales() {
-		return withSaturation && !saturation.isEmpty() && curves.size() == 1 && CurveChange.followsSaturation(curves.get(0).curve());
+		return followsSaturation() && curves.size() == 1 && CurveChange.followsSaturation(curves.get(0).curve());
+	}
+
+	/** Whether the curve goes with the saturation from temperature to temperature; a linear one cannot. */
+	private boolean followsSaturation() {
+		return withSaturation && !saturation.isEmpty() && curves.stream().noneMatch(c -> c.curve() instanceof LinearBh);
 	}
 
 	/** @return whether scaling was asked for where it has no effect */
 	boolean scalesInVain() {
-		return withSaturation && !scales();
+		return withSaturation && !followsSaturation();
 	}
 
 	boolean isOutsideCurves(double celsius) {
-		return curves.size() > 1 && (celsius < curves.get(0).celsius() || celsius > curves.get(curves.size() - 1).celsius());
+		return curves.size() > 1 && !followsSaturation() && (celsius < curves.get(0).celsius() || celsius > curves.get(curves.size() - 1).celsius());
+	}
+
+	/** @return K by which the saturation was scaled while the permeability, for want of figures, was kept; 0 if not so */
+	double keepsPermeabilityOver(double celsius) {
+		return followsSaturation() && permeability.isEmpty() ? Math.abs(celsius - heldAt(celsius)) : 0;
 	}
 
 	boolean isOutsidePermeabilities(double celsius) {
@@ -121,12 +132,21 @@ public final class MaterialData {
 	 */
 	public BhCurve curve(double celsius, double permeabilityFactor, double saturationFactor) {
 		BhCurve base = blended(celsius);
-		double factor = permeabilityFactor;
-		if (!permeability.isEmpty()) {
-			factor *= permeability.at(celsius) / CurveChange.initialPermeability(base);
+		double ratio = followsSaturation() ? saturation.at(celsius) / saturation.at(heldAt(celsius)) : 1;
+		if (ratio != 1 || !permeability.isEmpty()) {
+			base = base.with(permeability.isEmpty() ? CurveChange.initialPermeability(base) : permeability.at(celsius), ratio);
 		}
-		double scale = scales() ? saturationFactor * saturation.at(celsius) / saturation.at(curveCelsius) : 1;
-		return CurveChange.apply(base, factor, scale);
+		return CurveChange.apply(base, permeabilityFactor, scales() ? saturationFactor : 1);
+	}
+
+	/** The temperature that the curve used at the one asked for was given at or interpolated to. */
+	private double heldAt(double celsius) {
+		return Math.min(Math.max(celsius, curves.get(0).celsius()), curves.get(curves.size() - 1).celsius());
+	}
+
+	/** @return °C that the curves are given at, rising; at least one */
+	public double[] temperatures() {
+		return curves.stream().mapToDouble(CurveAt::celsius).toArray();
 	}
 
 	private BhCurve blended(double celsius) {

@@ -10,7 +10,6 @@ final class MaterialFindings {
 
 	/** Share by which a roll-off may miss the material's saturation before it is doubted (own rule). */
 	private static final double MISMATCH = 0.3;
-	private static final double ROOM_CELSIUS = 25;
 	/** K below the Curie temperature where a material is hardly one any more. */
 	private static final double NEAR_CURIE = 30;
 	/** K by which a curve may be used beside its temperature without a word. */
@@ -41,6 +40,11 @@ final class MaterialFindings {
 			note(material, point, "permeability is given from " + material.permeabilityRange() + "; its end value is used at "
 					+ Figures.of(celsius) + " °C", findings);
 		}
+		if (material.keepsPermeabilityOver(celsius) > SAME_WITHIN) {
+			findings.add(new Finding(Severity.NOTE, "permeability-kept", material.id(), point, "its curve is scaled to the"
+					+ " saturation at " + Figures.of(celsius) + " °C, its initial permeability is kept: none is given by temperature",
+					"Give initial permeabilities by temperature."));
+		}
 		if (material.statesCurveTemperature() && !material.dependsOnTemperature() && Math.abs(celsius - material.curveCelsius()) > SAME_WITHIN) {
 			findings.add(new Finding(Severity.NOTE, "curve-at-other-temperature", material.id(), point,
 					"the curve, which holds at " + Figures.of(material.curveCelsius()) + " °C, is used at " + Figures.of(celsius)
@@ -60,12 +64,12 @@ final class MaterialFindings {
 		if (data.scalesInVain()) {
 			findings.note("curve-scaling-in-vain", Lowering.id(material),
 					"the curve cannot follow the saturation: " + (saturation.isEmpty() ? "no saturation is given"
-							: "only a single Knee, Arctan or Roll-off curve can"),
+							: "a linear curve has none of its own"),
 					"Give further curves at other temperatures instead.");
 		}
 		if (curve instanceof RollOffBh rollOff && !saturation.isEmpty()) {
 			double tendsTo = rollOff.limitingPolarisation();
-			double given = saturation.at(ROOM_CELSIUS);
+			double given = saturation.at(data.curveCelsius());
 			if (Math.abs(tendsTo / given - 1) > MISMATCH) {
 				findings.warning("rolloff-saturation-mismatch", Lowering.id(material),
 						"the roll-off tends to " + Figures.of(tendsTo) + " T, the saturation given is "

@@ -159,6 +159,7 @@ public final class Study {
 		for (int p = 0; p < input.airPaths.size(); p++) {
 			airPaths.add(new AirPathResult(input.airPaths.get(p), s.airFlux()[p]));
 		}
+		RippleOnBias.add(input, point, s, findings);
 		long carrying = Arrays.stream(s.windingCurrent()).filter(i -> i != 0).count();
 		List<WindingResult> windings = new ArrayList<>();
 		List<Integer> whole = new ArrayList<>();
