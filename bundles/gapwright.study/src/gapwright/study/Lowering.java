@@ -15,6 +15,7 @@ import gapwright.model.AirPath;
 import gapwright.model.Coil;
 import gapwright.model.CurrentDrive;
 import gapwright.model.Design;
+import gapwright.model.Distribution;
 import gapwright.model.Drive;
 import gapwright.model.Element;
 import gapwright.model.Joint;
@@ -24,14 +25,18 @@ import gapwright.model.Limits;
 import gapwright.model.Magnet;
 import gapwright.model.Material;
 import gapwright.model.OperatingPoint;
+import gapwright.model.Tolerance;
 import gapwright.model.VoltageDrive;
 import gapwright.model.Winding;
 import gapwright.model.check.DesignCheck;
 import gapwright.model.check.Problem;
 import gapwright.model.check.Severity;
+import gapwright.model.quantity.Dimension;
+import gapwright.model.quantity.Quantity;
 import gapwright.physics.material.BhCurve;
 import gapwright.physics.network.Network;
 import gapwright.physics.network.NetworkValues;
+import gapwright.study.vary.DesignNumbers;
 
 /**
  * Lowers a design to plain numbers. An element with an error takes its whole island out of the network, because every
@@ -52,6 +57,8 @@ public final class Lowering {
 	private final Map<Leg, Integer> legIndex = new HashMap<>();
 	private final List<StudyInput.LegData> legs = new ArrayList<>();
 	private final List<StudyInput.GapData> gaps = new ArrayList<>();
+	private final List<Leg> drawn = new ArrayList<>();
+	private final List<String> coils = new ArrayList<>();
 	private final List<String> airPaths = new ArrayList<>();
 	private final List<StudyInput.WindingData> windings = new ArrayList<>();
 	private final Map<Winding, Integer> windingIndex = new HashMap<>();
@@ -111,7 +118,8 @@ public final class Lowering {
 		}
 		PairLowering pairs = new PairLowering(design, windingIndex, windings, broken, findings);
 		return new StudyInput(design.getName() == null ? "" : design.getName(), near, network, legs, gaps, airPaths,
-				windings, pairs.leakages(), pairs.connections(), points, findings.list());
+				windings, pairs.leakages(), pairs.connections(), points, findings.list(), coils,
+				new DesignNumbers(network, drawn, legs, gaps), tolerances());
 	}
 
 	/** A gap's error is its leg's, a curve's its material's; a coil is judged by its winding, a drive by its point. */
@@ -154,7 +162,8 @@ public final class Lowering {
 		int index = builder.leg(joints.get(leg.getFrom()), joints.get(leg.getTo()), data.curve(data.curveCelsius()),
 				Math.max(0, LegGeometry.ironLength(leg)), gross * leg.getStackingFactor(), reluctance, mmf);
 		legIndex.put(leg, index);
-		legs.add(new StudyInput.LegData(id(leg), data));
+		legs.add(new StudyInput.LegData(id(leg), data, magnet == null ? null : id(magnet)));
+		drawn.add(leg);
 		legMaterials.add(data);
 		gaps.addAll(gapLowering.data(leg, index));
 	}
@@ -178,6 +187,7 @@ public final class Lowering {
 			if (leg == null || broken.contains(coil)) {
 				whole = false;
 			} else {
+				coils.add(id(coil));
 				builder.coil(index, leg, coil.isReversed() ? -coil.getTurns() : coil.getTurns());
 			}
 		}
@@ -231,6 +241,20 @@ public final class Lowering {
 			}
 			return network.with(values);
 		});
+	}
+
+	private List<StudyInput.ToleranceData> tolerances() {
+		List<StudyInput.ToleranceData> data = new ArrayList<>();
+		for (Tolerance tolerance : design.getTolerances()) {
+			if (!broken.contains(tolerance)) {
+				Quantity deviation = tolerance.getDeviation();
+				boolean share = deviation.dimension() == Dimension.DEVIATION;
+				data.add(new StudyInput.ToleranceData(id(tolerance), tolerance.getFeature(),
+						tolerance.getTargets().stream().map(Lowering::id).toList(), share ? deviation.si() : Double.NaN,
+						share ? Double.NaN : deviation.si(), tolerance.getDistribution() == Distribution.NORMAL));
+			}
+		}
+		return data;
 	}
 
 	static String id(Element element) {

@@ -3,10 +3,12 @@ package gapwright.study;
 import java.util.List;
 import java.util.stream.IntStream;
 
+import gapwright.model.TolerancedFeature;
 import gapwright.physics.gap.Fringing;
 import gapwright.physics.gap.GapGeometry;
 import gapwright.physics.leakage.WindingPair;
 import gapwright.physics.network.Network;
+import gapwright.study.vary.DesignNumbers;
 
 /**
  * A design lowered to plain numbers at one moment: nothing of the model is left in it, so it may be computed with in any
@@ -14,8 +16,8 @@ import gapwright.physics.network.Network;
  */
 public final class StudyInput {
 
-	/** What is judged about a leg; index is the network's. */
-	public record LegData(String id, MaterialData material) {
+	/** What is judged about a leg; index is the network's. @param magnet id of its magnet, or null */
+	public record LegData(String id, MaterialData material, String magnet) {
 
 		public SaturationData saturation() {
 			return material.saturation();
@@ -65,6 +67,19 @@ public final class StudyInput {
 	public record LeakageData(String id, int first, int second, WindingPair pair) {
 	}
 
+	/**
+	 * A tolerance, on several elements that deviate together.
+	 *
+	 * @param feature  which value
+	 * @param targets  ids of the elements
+	 * @param share    greatest deviation as a share of the nominal value; NaN where an amount is given
+	 * @param amount   greatest deviation in the value's SI unit; NaN where a share is given
+	 * @param normal   normally distributed with the bound at three standard deviations, else uniformly
+	 */
+	public record ToleranceData(String id, TolerancedFeature feature, List<String> targets, double share, double amount,
+			boolean normal) {
+	}
+
 	/** Windings joined, by their index, each with its sense, 1 or −1. */
 	public record ConnectionData(String id, boolean series, int[] windings, int[] senses) {
 	}
@@ -80,10 +95,14 @@ public final class StudyInput {
 	final List<ConnectionData> connections;
 	final List<PointData> points;
 	final List<Finding> findings;
+	private final List<String> coils;
+	private final DesignNumbers numbers;
+	private final List<ToleranceData> tolerances;
 
 	StudyInput(String design, double nearFraction, Network network, List<LegData> legs, List<GapData> gaps,
 			List<String> airPaths, List<WindingData> windings, List<LeakageData> leakages, List<ConnectionData> connections,
-			List<PointData> points, List<Finding> findings) {
+			List<PointData> points, List<Finding> findings, List<String> coils, DesignNumbers numbers,
+			List<ToleranceData> tolerances) {
 		this.design = design;
 		this.nearFraction = nearFraction;
 		this.network = network;
@@ -95,6 +114,37 @@ public final class StudyInput {
 		this.connections = List.copyOf(connections);
 		this.points = List.copyOf(points);
 		this.findings = List.copyOf(findings);
+		this.coils = List.copyOf(coils);
+		this.numbers = numbers;
+		this.tolerances = List.copyOf(tolerances);
+	}
+
+	/** @return ids of the coils in the network, in its order */
+	public List<String> coils() {
+		return coils;
+	}
+
+	/** @return the numbers as drawn; copy before changing one */
+	public DesignNumbers numbers() {
+		return numbers;
+	}
+
+	/** @return tolerances without error */
+	public List<ToleranceData> tolerances() {
+		return tolerances;
+	}
+
+	/**
+	 * @return the operating point with that id
+	 * @throws IllegalArgumentException when it is not there or cannot be computed
+	 */
+	public PointData computable(String id) {
+		PointData point = point(id);
+		if (point == null || point.drives() == null) {
+			throw new IllegalArgumentException(point == null ? "there is no operating point '" + id + "'"
+					: "the operating point '" + id + "' cannot be computed, see the findings");
+		}
+		return point;
 	}
 
 	public String design() {

@@ -106,6 +106,11 @@ public final class Network {
 		return new Network(this, values);
 	}
 
+	/** @return whether another network has the same structure, down to the arrays that {@link #with} shares */
+	boolean isAlike(Network other) {
+		return from == other.from && to == other.to && coilWinding == other.coilWinding && coilLeg == other.coilLeg;
+	}
+
 	public int jointCount() {
 		return joints;
 	}

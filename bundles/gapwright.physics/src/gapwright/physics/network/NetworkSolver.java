@@ -37,14 +37,14 @@ public final class NetworkSolver {
 	/** Near the minimum the change of the co-energy is lost in rounding below this fraction of it. */
 	private static final double LOST_IN_ROUNDING = 1e-10;
 
-	private final Network network;
+	private Network network;
 	private final Topology topology;
 	private final SymmetricFactor factor;
-	private final Inductances inductances;
+	private Inductances inductances;
 	private final double[] conductance;
 	private final double[] potentialStep;
 	private final double[] currentStep;
-	private final ImposedLinkages none;
+	private ImposedLinkages none;
 	private State state;
 	private State trial;
 
@@ -80,6 +80,23 @@ public final class NetworkSolver {
 
 	public Network network() {
 		return network;
+	}
+
+	/**
+	 * Goes on with another network of the same structure, without setting the structure up again.
+	 *
+	 * @param other made by {@link Network#with} from this solver's network, or from what that was made from
+	 * @throws IllegalArgumentException when it has another structure
+	 */
+	public void exchange(Network other) {
+		if (!network.isAlike(other)) {
+			throw new IllegalArgumentException("the other network has another structure");
+		}
+		network = other;
+		inductances = new Inductances(network, topology, new CoilTable(network));
+		none = new ImposedLinkages(Excitation.currents(), inductances);
+		state.exchange(network);
+		trial.exchange(network);
 	}
 
 	/**

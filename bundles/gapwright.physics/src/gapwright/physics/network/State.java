@@ -7,7 +7,7 @@ import gapwright.physics.material.BhCurve;
 /** A trial solution: potentials, currents, and what follows from them branch by branch. Reused from step to step. */
 final class State {
 
-	private final Network network;
+	private Network network;
 	private final int[] unknown;
 	private final boolean[] bridge;
 	private final int legs;
@@ -30,6 +30,11 @@ final class State {
 		field = new double[legs];
 		flux = new double[network.branchCount()];
 		imbalance = new double[topology.unknowns()];
+	}
+
+	/** @param other of the same structure */
+	void exchange(Network other) {
+		network = other;
 	}
 
 	void copyFrom(State other) {
