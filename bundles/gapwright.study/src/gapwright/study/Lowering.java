@@ -8,6 +8,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.stream.Collectors;
 
 import org.eclipse.emf.ecore.EObject;
 
@@ -36,6 +37,7 @@ import gapwright.model.quantity.Quantity;
 import gapwright.physics.material.BhCurve;
 import gapwright.physics.network.Network;
 import gapwright.physics.network.NetworkValues;
+import gapwright.study.leakage.CountedTwice;
 import gapwright.study.vary.DesignNumbers;
 
 /**
@@ -105,6 +107,10 @@ public final class Lowering {
 		}
 		design.getWindings().forEach(this::winding);
 		Network network = builder.build();
+		CountedTwice.of(design).forEach((gap, paths) -> findings.warning("leakage-counted-twice", id(gap),
+				"the field across the window beside the gap is part of its conformal figure, and is counted again by "
+						+ paths.stream().map(path -> "'" + id(path) + "'").collect(Collectors.joining(", ")),
+				"Delete these air paths: the inductance comes closer without them."));
 		new TopologyFindings(design, network, legIndex, joints, islands, findings).add();
 		Limits limits = design.getLimits();
 		double near = limits == null || broken.contains(limits) ? DEFAULT_NEAR : limits.getNearFraction();

@@ -78,10 +78,6 @@ class EveryEditTest {
 		EDITS.put("MaterialEdits.addCopy", d -> MaterialEdits.addCopy(d, Sample.design().getMaterials().get(1)));
 		EDITS.put("MaterialEdits.changeCurve",
 				d -> MaterialEdits.changeCurve(material(d), GapwrightFactory.eINSTANCE.createTableCurve()));
-		EDITS.put("MaterialEdits.addCurve", d -> MaterialEdits.addCurve(material(d)));
-		EDITS.put("MaterialEdits.addPermeability", d -> MaterialEdits.addPermeability(material(d)));
-		EDITS.put("MaterialEdits.addSaturation worked out", d -> MaterialEdits.addSaturation(material(d),
-				material(d).getSaturations().get(0).getTemperature(), material(d).getSaturations().get(0).getFluxDensity()));
 		EDITS.put("MaterialEdits.addPoint", d -> MaterialEdits.addPoint((TableCurve) d.getMaterials().get(1).getCurve()));
 		EDITS.put("MaterialEdits.addSaturation", d -> MaterialEdits.addSaturation(material(d)));
 		EDITS.put("MaterialEdits.addSaturation as the first", d -> MaterialEdits.addSaturation(d.getMaterials().get(1)));
@@ -109,6 +105,11 @@ class EveryEditTest {
 		EDITS.put("DesignEdits.limits", d -> DesignEdits.limits(d, false));
 		EDITS.put("ToleranceEdits.add", d -> ToleranceEdits.add(d, List.of(leg(d, "top")), TolerancedFeature.WIDTH, mm("0.1 mm")));
 		EDITS.put("ToleranceEdits.retarget", d -> ToleranceEdits.retarget(d.getTolerances().get(0), leg(d, "top").getGaps().subList(0, 1)));
+		EDITS.put("LeakageEdits.add", d -> LeakageEdits.add(d,
+				List.of(new LeakageEdits.Cut(leg(d, "top"), List.of(0.3, 0.8), 0.1, 0.9),
+						new LeakageEdits.Cut(leg(d, "left"), List.of(0.5), 0.1, 0.9)),
+				List.of(new LeakageEdits.Path(new LeakageEdits.Point(leg(d, "top"), 0.3), new LeakageEdits.Point(leg(d, "left"), 0.5), 12.3456e-9),
+						new LeakageEdits.Path(new LeakageEdits.Point(leg(d, "bottom"), 0), new LeakageEdits.Point(leg(d, "top"), 1), 5e-9))));
 		EDITS.put("PairEdits.addLeakage", d -> PairEdits.addLeakage(d, winding(d, "sense"), winding(d, "main")));
 		EDITS.put("PairEdits.addConnection", d -> PairEdits.addConnection(d, ConnectionKind.PARALLEL, d.getWindings()));
 		EDITS.put("PairEdits.join", d -> PairEdits.join(d.getConnections().get(0), winding(d, "main")));
