@@ -7,6 +7,7 @@ import gapwright.model.check.Severity;
 import gapwright.physics.material.BhCurve;
 import gapwright.physics.material.BlendedBh;
 import gapwright.physics.material.StretchedBh;
+import gapwright.physics.material.LinearBh;
 import gapwright.physics.material.TableBh;
 import gapwright.physics.network.Solution;
 
@@ -31,7 +32,9 @@ final class LegJudge {
 		StudyInput.LegData leg = input.legs.get(k);
 		double saturation = leg.saturation().at(point.celsius());
 		double utilisation = peak / saturation;
-		LegState state = Double.isNaN(utilisation) ? LegState.UNKNOWN
+		boolean air = Double.isNaN(saturation) && point.network().curve(k) instanceof LinearBh linear
+				&& linear.relativePermeability() == 1;
+		LegState state = air ? LegState.WITHIN : Double.isNaN(utilisation) ? LegState.UNKNOWN
 				: utilisation >= 1 ? LegState.OVER : utilisation >= input.nearFraction ? LegState.NEAR : LegState.WITHIN;
 		if (state == LegState.OVER) {
 			add(Severity.ERROR, Findings.OVER, leg.id(), reached(peak, utilisation, saturation)

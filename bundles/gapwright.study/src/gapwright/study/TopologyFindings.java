@@ -9,6 +9,7 @@ import gapwright.model.Design;
 import gapwright.model.Joint;
 import gapwright.model.Leg;
 import gapwright.model.Winding;
+import gapwright.physics.material.LinearBh;
 import gapwright.physics.network.Network;
 
 /** What the shape of the network says: legs, coils and joints on no closed path, islands, air paths too good to be so. */
@@ -83,8 +84,10 @@ final class TopologyFindings {
 
 	/** Permeance of an unsaturated leg is the most its iron and gaps can carry; air beats that only by mistake. */
 	private void airPaths() {
+		boolean hasIron = false;
 		double best = 0;
 		for (int k = 0; k < network.legCount(); k++) {
+			hasIron |= !(network.curve(k) instanceof LinearBh linear && linear.relativePermeability() == 1);
 			double iron = network.curve(k).slope(0) * network.ironArea(k);
 			best = Math.max(best, iron / (network.pathLength(k) + network.seriesReluctance(k) * iron));
 		}
@@ -93,7 +96,7 @@ final class TopologyFindings {
 			boolean lowered = islands.isSound(path.getFrom()) && islands.isSound(path.getTo());
 			if (lowered && index < network.airPathCount()) {
 				double permeance = network.permeance(index++);
-				if (network.legCount() > 0 && permeance > best) {
+				if (hasIron && permeance > best) {
 					findings.warning("air-path-large", Lowering.id(path),
 							"its permeance of " + Figures.of(permeance * 1e9) + " nH is above that of every leg",
 							"Check its unit.");

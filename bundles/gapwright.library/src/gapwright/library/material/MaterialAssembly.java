@@ -66,7 +66,8 @@ final class MaterialAssembly {
 		String plain = Normalizer.normalize(name.replace("µ", "u"), Normalizer.Form.NFD).toLowerCase(Locale.ROOT)
 				.replaceAll("[^a-z0-9]+", "-").replaceAll("^-|-$", "");
 		String cut = plain.length() > 60 ? plain.substring(0, 60) : plain;
-		return cut.isEmpty() ? "material" : cut;
+		// an id begins with a letter
+		return cut.isEmpty() ? "material" : Character.isDigit(cut.charAt(0)) ? "material-" + cut : cut;
 	}
 
 	private void curves() {

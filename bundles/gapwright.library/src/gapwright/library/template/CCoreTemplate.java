@@ -6,8 +6,9 @@ import java.util.Map;
 import gapwright.model.Design;
 import gapwright.model.Joint;
 import gapwright.model.Leg;
-import gapwright.model.Winding;
 import gapwright.model.quantity.Quantity;
+import gapwright.physics.core.EffectiveParameters;
+import gapwright.physics.core.PathPart;
 
 /** Two legs and two yokes of one width; the winding on the gapped right leg. */
 final class CCoreTemplate implements Template {
@@ -42,6 +43,30 @@ final class CCoreTemplate implements Template {
 		return FIELDS;
 	}
 
+	private record Path(PathPart leg, PathPart yoke, PathPart corner) {
+
+		EffectiveParameters parameters() {
+			return EffectiveParameters.of(List.of(leg.times(2), yoke.times(2), corner.times(4)));
+		}
+
+		/** Half of both its corners goes to each bar, in mm of its own area. */
+		double millimetres(PathPart bar) {
+			return (bar.c1() + corner.c1()) * bar.minimumArea() * 1e3;
+		}
+	}
+
+	private static Path path(Entries entries) {
+		double width = entries.metres("width");
+		double depth = entries.metres("depth");
+		return new Path(PathPart.prism(entries.metres("windowHeight"), width * depth),
+				PathPart.prism(entries.metres("windowWidth"), width * depth), PathPart.corner(width, width, depth));
+	}
+
+	@Override
+	public String figures(Map<String, String> values) {
+		return ShapeFigures.of(path(new Entries(FIELDS, values)).parameters());
+	}
+
 	@Override
 	public Design build(Map<String, String> values) {
 		Entries entries = new Entries(FIELDS, values);
@@ -51,20 +76,27 @@ final class CCoreTemplate implements Template {
 		double right = left + width + entries.millimetres("windowWidth");
 		double top = MARGIN + width / 2;
 		double bottom = top + width + entries.millimetres("windowHeight");
+		Path path = path(entries);
+		Quantity gap = entries.notNegative("gap");
+		double iron = path.millimetres(path.leg()) - gap.si() * 1e3;
+		if (!(iron > 0)) {
+			throw new IllegalArgumentException("Gap: must be shorter than the leg");
+		}
 		CoreSketch sketch = new CoreSketch("Gapped C core").material("mnzn-power-ferrite");
 		Joint topLeft = sketch.joint("top-left", left, top);
 		Joint topRight = sketch.joint("top-right", right, top);
 		Joint bottomLeft = sketch.joint("bottom-left", left, bottom);
 		Joint bottomRight = sketch.joint("bottom-right", right, bottom);
 		Leg wound = sketch.leg("right-leg", "right leg", bottomRight, topRight, width, depth);
-		sketch.leg("top-yoke", "top yoke", topRight, topLeft, width, depth);
-		sketch.leg("left-leg", "left leg", topLeft, bottomLeft, width, depth);
-		sketch.leg("bottom-yoke", "bottom yoke", bottomLeft, bottomRight, width, depth);
-		sketch.gap(wound, entries.notNegative("gap"));
-		Winding main = sketch.winding("main", "main");
-		sketch.coil(main, wound, entries.turns("turns"), 0.5);
-		sketch.current(sketch.operatingPoint("full-load", "full load, hot", entries.quantity("temperature")), main,
-				entries.quantity("current"), entries.notNegative("ripple"));
+		wound.setPathLength(CoreSketch.exactMillimetres(iron));
+		sketch.leg("top-yoke", "top yoke", topRight, topLeft, width, depth)
+				.setPathLength(CoreSketch.exactMillimetres(path.millimetres(path.yoke())));
+		sketch.leg("left-leg", "left leg", topLeft, bottomLeft, width, depth)
+				.setPathLength(CoreSketch.exactMillimetres(path.millimetres(path.leg())));
+		sketch.leg("bottom-yoke", "bottom yoke", bottomLeft, bottomRight, width, depth)
+				.setPathLength(CoreSketch.exactMillimetres(path.millimetres(path.yoke())));
+		sketch.gap(wound, gap);
+		OneWinding.add(sketch, wound, entries);
 		return sketch.design();
 	}
 }

@@ -1,9 +1,11 @@
 package gapwright.library.template;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
 import java.math.RoundingMode;
 
 import gapwright.library.StockMaterials;
+import gapwright.model.AirPath;
 import gapwright.model.Coil;
 import gapwright.model.CurrentDrive;
 import gapwright.model.Design;
@@ -14,6 +16,7 @@ import gapwright.model.Joint;
 import gapwright.model.Leg;
 import gapwright.model.Material;
 import gapwright.model.OperatingPoint;
+import gapwright.model.SectionShape;
 import gapwright.model.Winding;
 import gapwright.model.quantity.Dimension;
 import gapwright.model.quantity.Quantity;
@@ -22,6 +25,8 @@ import gapwright.model.quantity.Quantity;
 public final class CoreSketch {
 
 	private static final GapwrightFactory FACTORY = GapwrightFactory.eINSTANCE;
+
+	private static final MathContext DIGITS = new MathContext(13);
 
 	private final Design design = FACTORY.createDesign();
 	private Material material;
@@ -49,6 +54,30 @@ public final class CoreSketch {
 		return joint;
 	}
 
+	/** A leg whose section is to be set. */
+	public Leg leg(String id, String name, Joint from, Joint to) {
+		Leg leg = FACTORY.createLeg();
+		leg.setId(id);
+		leg.setName(name);
+		leg.setFrom(from);
+		leg.setTo(to);
+		leg.setMaterial(material);
+		design.getLegs().add(leg);
+		return leg;
+	}
+
+	/** Air between two joints, by its permeance in H. */
+	public AirPath airPath(String id, String name, Joint from, Joint to, double permeance) {
+		AirPath path = FACTORY.createAirPath();
+		path.setId(id);
+		path.setName(name);
+		path.setFrom(from);
+		path.setTo(to);
+		path.setPermeance(Quantity.of(new BigDecimal(permeance * 1e9).round(DIGITS).doubleValue(), "nH", Dimension.PERMEANCE));
+		design.getAirPaths().add(path);
+		return path;
+	}
+
 	/** A leg of rectangular section. */
 	public Leg leg(String id, String name, Joint from, Joint to, double width, Quantity depth) {
 		Leg leg = FACTORY.createLeg();
@@ -61,6 +90,22 @@ public final class CoreSketch {
 		leg.setDepth(depth);
 		design.getLegs().add(leg);
 		return leg;
+	}
+
+	/** @param width mm */
+	static EDrawing.Shape rectangle(double width, Quantity depth) {
+		return leg -> {
+			leg.setWidth(millimetres(width));
+			leg.setDepth(depth);
+		};
+	}
+
+	/** @param area m² */
+	static EDrawing.Shape given(double area) {
+		return leg -> {
+			leg.setShape(SectionShape.GIVEN);
+			leg.setArea(exactSquareMillimetres(area * 1e6));
+		};
 	}
 
 	/** A gap of one piece in the middle of a leg; none when the length is 0. */
@@ -116,6 +161,16 @@ public final class CoreSketch {
 
 	public Design design() {
 		return design;
+	}
+
+	/** @return a length to thirteen digits, for sums that must hold */
+	static Quantity exactMillimetres(double value) {
+		return Quantity.of(new BigDecimal(value).round(DIGITS).doubleValue(), "mm", Dimension.LENGTH);
+	}
+
+	/** @return an area to thirteen digits */
+	static Quantity exactSquareMillimetres(double value) {
+		return Quantity.of(new BigDecimal(value).round(DIGITS).doubleValue(), "mm²", Dimension.AREA);
 	}
 
 	/** @return a length rounded to a micrometre */

@@ -59,6 +59,31 @@ final class Entries {
 		return size(key).si() * 1e3;
 	}
 
+	/** @return metres, above 0 */
+	double metres(String key) {
+		return size(key).si();
+	}
+
+	/** @return a ratio above 0, at most 1 */
+	double share(String key) {
+		try {
+			double value = Double.parseDouble(text(key));
+			if (value > 0 && value <= 1) {
+				return value;
+			}
+		} catch (NumberFormatException e) {
+			// falls through to the one message
+		}
+		throw new IllegalArgumentException(field(key).label() + ": must be above 0, at most 1");
+	}
+
+	/** @return the sum of two lengths that are 0 or above; the first as typed where the other is 0 */
+	Quantity sum(String first, String second) {
+		Quantity a = notNegative(first);
+		Quantity b = notNegative(second);
+		return b.si() == 0 ? a : a.si() == 0 ? b : CoreSketch.millimetres((a.si() + b.si()) * 1e3);
+	}
+
 	int turns(String key) {
 		try {
 			int turns = Integer.parseInt(text(key));

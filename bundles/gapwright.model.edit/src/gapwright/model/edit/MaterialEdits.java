@@ -5,10 +5,12 @@ import java.util.Locale;
 import org.eclipse.emf.ecore.util.EcoreUtil;
 
 import gapwright.model.Curve;
+import gapwright.model.CurveAtTemperature;
 import gapwright.model.CurvePoint;
 import gapwright.model.Design;
 import gapwright.model.GapwrightFactory;
 import gapwright.model.Ids;
+import gapwright.model.InitialPermeability;
 import gapwright.model.LinearCurve;
 import gapwright.model.Material;
 import gapwright.model.Saturation;
@@ -54,6 +56,49 @@ public final class MaterialEdits {
 	/** Puts another curve, which belongs to no material yet, in place of the one there. */
 	public static Edit changeCurve(Material material, Curve curve) {
 		return new Edit("Change curve", material, () -> material.setCurve(curve));
+	}
+
+	/** As above, of a further curve. */
+	public static Edit changeCurve(CurveAtTemperature place, Curve curve) {
+		return new Edit("Change curve", place, () -> place.setCurve(curve));
+	}
+
+	/** Adds a curve 75 K above the hottest, a copy of the first one, to be typed over. */
+	public static Edit addCurve(Material material) {
+		return new Edit("Add curve", material, () -> {
+			double hottest = material.getCurveTemperature() == null ? 25 : material.getCurveTemperature().si();
+			for (CurveAtTemperature each : material.getOtherCurves()) {
+				hottest = each.getTemperature() == null ? hottest : Math.max(hottest, each.getTemperature().si());
+			}
+			CurveAtTemperature next = GapwrightFactory.eINSTANCE.createCurveAtTemperature();
+			next.setTemperature(Quantity.of(round(hottest + 75), "°C", Dimension.TEMPERATURE));
+			next.setCurve(EcoreUtil.copy(material.getCurve()));
+			material.getOtherCurves().add(next);
+		});
+	}
+
+	/** Adds an initial permeability behind the last: the same value 75 K above, or a mid-range ferrite's at 25 °C. */
+	public static Edit addPermeability(Material material) {
+		return new Edit("Add initial permeability", material, () -> {
+			InitialPermeability next = GapwrightFactory.eINSTANCE.createInitialPermeability();
+			int count = material.getPermeabilities().size();
+			InitialPermeability last = count == 0 ? null : material.getPermeabilities().get(count - 1);
+			boolean known = last != null && last.getTemperature() != null;
+			next.setTemperature(known ? Quantity.of(round(last.getTemperature().si() + 75), "°C", Dimension.TEMPERATURE)
+					: Quantity.parse("25 °C", Dimension.TEMPERATURE));
+			next.setRelativePermeability(known ? last.getRelativePermeability() : PERMEABILITY);
+			material.getPermeabilities().add(next);
+		});
+	}
+
+	/** Adds a saturation that somebody has worked out. */
+	public static Edit addSaturation(Material material, Quantity temperature, Quantity fluxDensity) {
+		return new Edit("Add saturation", material, () -> {
+			Saturation saturation = GapwrightFactory.eINSTANCE.createSaturation();
+			saturation.setTemperature(temperature);
+			saturation.setFluxDensity(fluxDensity);
+			material.getSaturations().add(saturation);
+		});
 	}
 
 	/** Adds a point behind the last, at twice its field strength and a little more flux density, to be typed over. */

@@ -11,6 +11,7 @@ import java.util.Set;
 import gapwright.model.CurveAtTemperature;
 import gapwright.model.CurvePoint;
 import gapwright.model.InitialPermeability;
+import gapwright.model.LinearCurve;
 import gapwright.model.Material;
 import gapwright.model.Saturation;
 import gapwright.model.SteinmetzLoss;
@@ -42,13 +43,18 @@ final class MaterialCheck {
 		}
 		otherCurves(material);
 		permeabilities(material);
-		if (material.getSaturations().isEmpty()) {
+		if (material.getSaturations().isEmpty() && !isAir(material)) {
 			problems.add(ProblemCode.SATURATION_MISSING, material, MATERIAL__SATURATIONS,
 					"no saturation is given, so legs of this material cannot be judged",
 					"Add the saturation flux density of the maker's data sheet with its temperature.");
 		}
 		saturations(material);
 		loss(material.getLoss());
+	}
+
+	/** What is no more permeable than air does not saturate. */
+	private static boolean isAir(Material material) {
+		return material.getCurve() instanceof LinearCurve linear && linear.getRelativePermeability() == 1;
 	}
 
 	private void otherCurves(Material material) {

@@ -8,13 +8,13 @@ import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Label;
 
 /** The reason why a field is marked, in words below it; takes no room while there is none. */
-final class ProblemLine {
+public final class ProblemLine {
 
 	private final Label label;
 	private final GridData data = new GridData(SWT.FILL, SWT.TOP, true, false);
 
 	/** @param span columns of the parent's grid */
-	ProblemLine(Composite parent, int span) {
+	public ProblemLine(Composite parent, int span) {
 		label = new Label(parent, SWT.WRAP);
 		label.setForeground(JFaceResources.getColorRegistry().get(JFacePreferences.ERROR_COLOR));
 		data.horizontalSpan = span;
@@ -25,7 +25,7 @@ final class ProblemLine {
 	}
 
 	/** @return whether the line came, went or changed, so that a new layout is due */
-	boolean show(String problem) {
+	public boolean show(String problem) {
 		String text = problem == null ? "" : problem;
 		if (label.isDisposed() || text.equals(label.getText())) {
 			return false;

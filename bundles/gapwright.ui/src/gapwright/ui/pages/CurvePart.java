@@ -2,15 +2,19 @@ package gapwright.ui.pages;
 
 import static gapwright.model.GapwrightPackage.Literals.ARCTAN_CURVE__INITIAL_PERMEABILITY;
 import static gapwright.model.GapwrightPackage.Literals.ARCTAN_CURVE__SATURATION_POLARISATION;
+import static gapwright.model.GapwrightPackage.Literals.CURVE_AT_TEMPERATURE__TEMPERATURE;
 import static gapwright.model.GapwrightPackage.Literals.CURVE_POINT__FIELD_STRENGTH;
 import static gapwright.model.GapwrightPackage.Literals.CURVE_POINT__FLUX_DENSITY;
 import static gapwright.model.GapwrightPackage.Literals.KNEE_CURVE__INITIAL_PERMEABILITY;
 import static gapwright.model.GapwrightPackage.Literals.KNEE_CURVE__SATURATION_POLARISATION;
 import static gapwright.model.GapwrightPackage.Literals.LINEAR_CURVE__RELATIVE_PERMEABILITY;
+import static gapwright.model.GapwrightPackage.Literals.MATERIAL__CURVE_SCALING;
+import static gapwright.model.GapwrightPackage.Literals.MATERIAL__CURVE_TEMPERATURE;
 import static gapwright.model.GapwrightPackage.Literals.ROLL_OFF_CURVE__EXPONENT;
 import static gapwright.model.GapwrightPackage.Literals.ROLL_OFF_CURVE__HALF_FIELD_STRENGTH;
 import static gapwright.model.GapwrightPackage.Literals.ROLL_OFF_CURVE__INITIAL_PERMEABILITY;
 
+import java.util.ArrayList;
 import java.util.List;
 
 import org.eclipse.swt.SWT;
@@ -22,6 +26,7 @@ import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Label;
 
 import gapwright.model.Curve;
+import gapwright.model.CurveAtTemperature;
 import gapwright.model.Material;
 import gapwright.model.TableCurve;
 import gapwright.model.edit.DesignEdits;
@@ -31,24 +36,49 @@ import gapwright.ui.fields.ElementRows;
 import gapwright.ui.fields.FeatureForm;
 import gapwright.ui.fields.FormLayouts;
 
-/** The B-H curve of a material: its kind, its parameters or points, and its picture. */
+/** The B-H curves of a material, one of them at a time: its temperature, its kind, its parameters or points. */
 final class CurvePart {
 
 	private final MasterDetailPage page;
+	private final Combo which;
+	private final Button remove;
+	private final FeatureForm place;
 	private final Combo kind;
 	private final Label law;
 	private final FeatureForm parameters;
 	private final Composite table;
 	private final ElementRows points;
-	private final CurvePlot plot;
 	private Material material;
+	/** Null where the material's first curve is shown. */
+	private CurveAtTemperature other;
 
 	CurvePart(Composite parent, MasterDetailPage page) {
 		this.page = page;
-		parent.setLayout(new GridLayout(2, false));
-		Composite fields = new Composite(parent, SWT.NONE);
-		fields.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+		Composite fields = parent;
 		fields.setLayout(FormLayouts.grid(1));
+		Composite choice = new Composite(fields, SWT.NONE);
+		choice.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+		GridLayout row = new GridLayout(3, false);
+		row.marginWidth = 0;
+		row.marginHeight = 0;
+		choice.setLayout(row);
+		which = new Combo(choice, SWT.READ_ONLY);
+		which.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+		which.setToolTipText("Which of the material's curves is shown below");
+		which.addListener(SWT.Selection, event -> chooseCurve(which.getSelectionIndex()));
+		Accessibles.name(which, "Curve shown");
+		Button another = new Button(choice, SWT.PUSH);
+		another.setText("Add temperature");
+		another.setToolTipText("Add the curve at a further temperature");
+		another.addListener(SWT.Selection, event -> addTemperature());
+		remove = new Button(choice, SWT.PUSH);
+		remove.setText("Remove temperature");
+		remove.setToolTipText("Remove the curve shown; the first one stays");
+		remove.addListener(SWT.Selection, event -> page.run(DesignEdits.remove("Remove curve", other)));
+		Composite placing = new Composite(fields, SWT.NONE);
+		placing.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+		place = new FeatureForm(placing, page.runner()).add(MATERIAL__CURVE_TEMPERATURE, CURVE_AT_TEMPERATURE__TEMPERATURE,
+				MATERIAL__CURVE_SCALING);
 		kind = new Combo(fields, SWT.READ_ONLY);
 		for (CurveKind each : CurveKind.values()) {
 			kind.add(each.label());
@@ -74,25 +104,41 @@ final class CurvePart {
 				point -> "point", point -> page.run(DesignEdits.remove("Remove curve point", point)));
 		Button add = new Button(table, SWT.PUSH);
 		add.setText("Add point");
-		add.addListener(SWT.Selection, event -> page.run(MaterialEdits.addPoint((TableCurve) material.getCurve())));
-		plot = new CurvePlot(parent);
-		GridData square = new GridData(SWT.FILL, SWT.TOP, true, false);
-		square.widthHint = 270;
-		square.minimumWidth = 200;
-		square.heightHint = 220;
-		plot.setLayoutData(square);
+		add.addListener(SWT.Selection, event -> page.run(MaterialEdits.addPoint((TableCurve) curve())));
+	}
+
+	private Curve curve() {
+		return other == null ? material.getCurve() : other.getCurve();
+	}
+
+	private void chooseCurve(int index) {
+		other = index <= 0 ? null : material.getOtherCurves().get(index - 1);
+		show(material);
+	}
+
+	private void addTemperature() {
+		int before = material.getOtherCurves().size();
+		page.run(MaterialEdits.addCurve(material));
+		if (material.getOtherCurves().size() > before) {
+			chooseCurve(before + 1);
+		}
 	}
 
 	private void changeKind() {
 		CurveKind wanted = CurveKind.values()[kind.getSelectionIndex()];
-		if (wanted != CurveKind.of(material.getCurve())) {
-			page.run(MaterialEdits.changeCurve(material, wanted.create(material.getCurve())));
+		if (wanted != CurveKind.of(curve())) {
+			Curve next = wanted.create(curve());
+			page.run(other == null ? MaterialEdits.changeCurve(material, next) : MaterialEdits.changeCurve(other, next));
 		}
 	}
 
 	void show(Material next) {
 		material = next;
-		Curve curve = material.getCurve();
+		if (!material.getOtherCurves().contains(other)) {
+			other = null;
+		}
+		showChoice();
+		Curve curve = curve();
 		CurveKind current = CurveKind.of(curve);
 		if (current == null) {
 			kind.deselectAll();
@@ -104,7 +150,18 @@ final class CurvePart {
 		FormLayouts.show(parameters.control(), curve != null && !(curve instanceof TableCurve));
 		FormLayouts.show(table, curve instanceof TableCurve);
 		points.show(curve instanceof TableCurve tabled ? tabled.getPoints() : List.of());
-		plot.show(material);
 		FormLayouts.relayout(table);
+	}
+
+	private void showChoice() {
+		List<String> names = new ArrayList<>();
+		names.add("Curve at " + (material.getCurveTemperature() == null ? "25 °C" : material.getCurveTemperature()));
+		material.getOtherCurves().forEach(each -> names.add("Curve at " + (each.getTemperature() == null ? "?" : each.getTemperature())));
+		if (!names.equals(List.of(which.getItems()))) {
+			which.setItems(names.toArray(new String[0]));
+		}
+		which.select(other == null ? 0 : 1 + material.getOtherCurves().indexOf(other));
+		remove.setEnabled(other != null);
+		place.bind(other == null ? material : other);
 	}
 }

@@ -12,10 +12,12 @@ import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Label;
+import org.eclipse.swt.widgets.Text;
 import org.eclipse.ui.PlatformUI;
 
 import gapwright.library.template.TemplateField;
 import gapwright.model.Design;
+import gapwright.ui.fields.Accessibles;
 import gapwright.ui.fields.EntryText;
 import gapwright.ui.fields.FormLayouts;
 
@@ -27,6 +29,7 @@ final class DimensionsPage extends WizardPage {
 	private Start start;
 	private Composite form;
 	private DesignPicture picture;
+	private Text figures;
 	private Design design;
 
 	DimensionsPage() {
@@ -49,6 +52,13 @@ final class DimensionsPage extends WizardPage {
 		wide.widthHint = 360;
 		wide.heightHint = 320;
 		picture.setLayoutData(wide);
+		figures = new Text(area, SWT.MULTI | SWT.READ_ONLY | SWT.WRAP);
+		GridData below = new GridData(SWT.FILL, SWT.BOTTOM, true, false, 2, 1);
+		below.widthHint = 700;
+		below.heightHint = 2 * figures.getLineHeight() + 4;
+		figures.setLayoutData(below);
+		figures.setBackground(area.getBackground());
+		Accessibles.name(figures, "What the dimensions amount to");
 		setControl(area);
 		PlatformUI.getWorkbench().getHelpSystem().setHelp(area, "gapwright.help.newDesign");
 		rebuild();
@@ -106,6 +116,7 @@ final class DimensionsPage extends WizardPage {
 		setErrorMessage(problem);
 		setPageComplete(problem == null);
 		picture.show(design);
+		figures.setText(design == null ? "" : start.figures(values));
 	}
 
 	/** Null while what is typed makes no core. */

@@ -37,6 +37,11 @@ abstract class Start {
 	 */
 	abstract Design build(Map<String, String> values);
 
+	/** @return what the dimensions amount to, a sentence a line; "" when there is nothing to say */
+	String figures(Map<String, String> values) {
+		return "";
+	}
+
 	abstract boolean isExample();
 
 	private static final class FromTemplate extends Start {
@@ -65,6 +70,11 @@ abstract class Start {
 		@Override
 		Design build(Map<String, String> values) {
 			return template.build(values);
+		}
+
+		@Override
+		String figures(Map<String, String> values) {
+			return template.figures(values);
 		}
 
 		@Override

@@ -108,6 +108,12 @@ class MaterialFileTest {
 	}
 
 	@Test
+	void theIdIsMadeOfTheNameAndBeginsWithALetter() {
+		assertEquals("material-3c-ferrite-u-2300", read(EXAMPLE.replace("Example ferrite", "3C Ferrite µ 2300")).material().getId());
+		assertEquals("material", read(EXAMPLE.replace("Example ferrite", "磁性")).material().getId());
+	}
+
+	@Test
 	void tooFewLossPointsAreSaidAndLeftOut() {
 		MaterialReading reading = read("gapwright-material,1\nname,X\nknee,2300,0.569 T\nloss,100 kHz,0.1 T,100 °C,60 kW/m³\n");
 		assertNull(reading.material().getLoss());

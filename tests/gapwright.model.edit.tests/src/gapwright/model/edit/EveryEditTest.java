@@ -78,6 +78,10 @@ class EveryEditTest {
 		EDITS.put("MaterialEdits.addCopy", d -> MaterialEdits.addCopy(d, Sample.design().getMaterials().get(1)));
 		EDITS.put("MaterialEdits.changeCurve",
 				d -> MaterialEdits.changeCurve(material(d), GapwrightFactory.eINSTANCE.createTableCurve()));
+		EDITS.put("MaterialEdits.addCurve", d -> MaterialEdits.addCurve(material(d)));
+		EDITS.put("MaterialEdits.addPermeability", d -> MaterialEdits.addPermeability(material(d)));
+		EDITS.put("MaterialEdits.addSaturation worked out", d -> MaterialEdits.addSaturation(material(d),
+				material(d).getSaturations().get(0).getTemperature(), material(d).getSaturations().get(0).getFluxDensity()));
 		EDITS.put("MaterialEdits.addPoint", d -> MaterialEdits.addPoint((TableCurve) d.getMaterials().get(1).getCurve()));
 		EDITS.put("MaterialEdits.addSaturation", d -> MaterialEdits.addSaturation(material(d)));
 		EDITS.put("MaterialEdits.addSaturation as the first", d -> MaterialEdits.addSaturation(d.getMaterials().get(1)));
