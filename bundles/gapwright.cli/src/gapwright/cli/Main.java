@@ -16,6 +16,7 @@ public final class Main {
 	private static final String HELP = """
 			usage: gapwright check FILE… [--json | --csv]
 			       gapwright sweep FILE… [--winding ID] [--point ID] [--from A] [--to A] [--steps N] [--json | --csv]
+			       gapwright library [FILE… [--field-unit U] [--flux-unit U]]
 			       gapwright --help | --version
 
 			check   computes every design at all its operating points and judges each leg against saturation
@@ -26,6 +27,9 @@ public final class Main {
 			        --point ID    operating point whose temperature and other currents hold; left out: the first
 			        --from, --to  currents with a unit, "14 A"; left out: 0 A to 1.5 times the largest of all points
 			        --steps N     equal steps; left out: 20
+			library without a file: lists the stock materials; with NAME.gapmaterial.csv files: writes a design file that holds
+			        those materials to standard output, or says by line and column why it cannot
+			        --field-unit U, --flux-unit U  for numbers without a unit, instead of what the file says
 
 			exit status: 0 all within, 1 something near saturation or not judged, 2 something over,
 			             64 wrong usage, 65 a design cannot be read or solved, 70 a fault of this program
@@ -61,6 +65,8 @@ public final class Main {
 				return new CheckCommand(out, err).run(arguments.subList(1, arguments.size()));
 			case "sweep":
 				return new SweepCommand(out, err).run(arguments.subList(1, arguments.size()));
+			case "library":
+				return new LibraryCommand(out, err).run(arguments.subList(1, arguments.size()));
 			case "":
 				throw new UsageException("no verb is given");
 			default:

@@ -32,7 +32,7 @@ class ArrowsTest {
 			Map.entry("gapwright.library", Set.of("gapwright.physics", "gapwright.model")),
 			Map.entry("gapwright.study", Set.of("gapwright.physics", "gapwright.model")),
 			Map.entry("gapwright.report", Set.of("gapwright.study", "gapwright.model")),
-			Map.entry("gapwright.cli", Set.of("gapwright.report", "gapwright.study", "gapwright.model")),
+			Map.entry("gapwright.cli", Set.of("gapwright.report", "gapwright.study", "gapwright.library", "gapwright.physics", "gapwright.model")),
 			Map.entry("gapwright.workspace", Set.of("gapwright.study", "gapwright.model")),
 			Map.entry("gapwright.ui",
 					Set.of("gapwright.physics", "gapwright.model", "gapwright.model.edit", "gapwright.library",
