@@ -66,7 +66,8 @@ public final class CurvePlot extends Canvas {
 		Rectangle all = getClientArea();
 		gc.setBackground(ThemeColours.PAPER.get());
 		gc.fillRectangle(all);
-		Rectangle area = new Rectangle(LEFT, TOP, all.width - LEFT - RIGHT, all.height - TOP - BOTTOM);
+		int below = picture == null || picture.kind() == PlotKind.FLUX_DENSITY ? 0 : rows() * gc.getFontMetrics().getHeight();
+		Rectangle area = new Rectangle(LEFT, TOP, all.width - LEFT - RIGHT, all.height - TOP - BOTTOM - below);
 		gc.setForeground(ThemeColours.INK.get());
 		if (picture == null) {
 			gc.drawText(trouble, 8, TOP, true);
@@ -165,23 +166,31 @@ public final class CurvePlot extends Canvas {
 		}
 	}
 
-	/** Below at the right for rising curves, below at the left for falling ones. */
+	/** Lines of the legend below the axis, two names in each. */
+	private int rows() {
+		return (picture.lines().size() + 1) / 2;
+	}
+
+	/** Inside, below at the right, for rising curves; falling ones would cross it, so theirs stands below the axis. */
 	private void legend(GC gc, Rectangle area) {
 		int height = gc.getFontMetrics().getHeight();
 		int width = 0;
 		for (CurvePicture.Line line : picture.lines()) {
 			width = Math.max(width, gc.textExtent(line.name()).x);
 		}
-		int x = picture.kind() == PlotKind.FLUX_DENSITY ? area.x + area.width - width - SAMPLE - 16 : area.x + 8;
-		int y = area.y + area.height - height * picture.lines().size() - 8;
+		boolean inside = picture.kind() == PlotKind.FLUX_DENSITY;
+		int count = 0;
 		for (CurvePicture.Line line : picture.lines()) {
+			int x = inside ? area.x + area.width - width - SAMPLE - 16 : 8 + count % 2 * (area.x + area.width + RIGHT) / 2;
+			int y = inside ? area.y + area.height - height * (picture.lines().size() - count) - 8
+					: area.y + area.height + BOTTOM - 2 + count / 2 * height;
+			count++;
 			style(gc, line);
 			gc.drawLine(x, y + height / 2, x + SAMPLE, y + height / 2);
 			gc.setLineStyle(SWT.LINE_SOLID);
 			gc.setLineWidth(1);
 			gc.setForeground(ThemeColours.INK.get());
 			gc.drawText(line.name(), x + SAMPLE + 6, y, true);
-			y += height;
 		}
 	}
 

@@ -66,6 +66,8 @@ public abstract class MasterDetailPage extends Composite {
 		ScrolledComposite scrolled = new ScrolledComposite(parent, SWT.V_SCROLL | SWT.H_SCROLL);
 		scrolled.setExpandHorizontal(true);
 		scrolled.setExpandVertical(true);
+		// a field that Tab comes to scrolls into sight
+		scrolled.setShowFocusedControl(true);
 		return scrolled;
 	}
 
@@ -89,6 +91,8 @@ public abstract class MasterDetailPage extends Composite {
 
 	/** Chooses the element, or the one it belongs to. */
 	public final void reveal(EObject element) {
+		// the element may have come with a step that this page has not shown yet
+		refresh();
 		List<? extends EObject> all = elements(session.design());
 		for (EObject next = element; next != null; next = next.eContainer()) {
 			if (all.contains(next)) {

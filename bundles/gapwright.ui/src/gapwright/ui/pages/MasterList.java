@@ -20,6 +20,9 @@ import gapwright.ui.fields.Headings;
 /** The list on the left of a form page: elements by name, with buttons below. Exactly one is chosen as long as there is one. */
 final class MasterList {
 
+	/** More buttons than these would not fit beside each other. */
+	private static final int MOST_IN_A_ROW = 3;
+
 	private final Composite area;
 	private final Table table;
 	private final Composite buttons;
@@ -51,8 +54,9 @@ final class MasterList {
 	}
 
 	Button button(String text, String tip, Runnable action) {
-		((GridLayout) buttons.getLayout()).numColumns++;
 		Button button = new Button(buttons, SWT.PUSH);
+		int count = buttons.getChildren().length;
+		((GridLayout) buttons.getLayout()).numColumns = count > MOST_IN_A_ROW ? 2 : count;
 		button.setText(text);
 		button.setToolTipText(tip);
 		button.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));

@@ -85,13 +85,13 @@ public final class MaterialsPage extends MasterDetailPage {
 				.add(ELEMENT__NAME, ELEMENT__ID, MATERIAL__DENSITY, MATERIAL__CURIE_TEMPERATURE, MATERIAL__SOURCE);
 		Composite row = new Composite(into, SWT.NONE);
 		row.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-		GridLayout grid = new GridLayout(2, true);
+		GridLayout grid = new GridLayout(2, false);
 		grid.marginWidth = 0;
 		grid.marginHeight = 0;
 		grid.horizontalSpacing = 14;
 		row.setLayout(grid);
-		curve = new CurvePart(Headings.part(row, "Curve", ""), this);
-		plot = new PlotPart(Headings.part(row, "Plot", ""));
+		curve = new CurvePart(beside(Headings.part(row, "Curve", ""), 300), this);
+		plot = new PlotPart(beside(Headings.part(row, "Plot", ""), 240));
 		permeabilities = new ElementRows(Headings.part(into, "Initial permeability by temperature", "Replaces that of the curve; between temperatures on a straight line, beyond them the end value and a note."),
 				runner(), List.of(INITIAL_PERMEABILITY__TEMPERATURE, INITIAL_PERMEABILITY__RELATIVE_PERMEABILITY), each -> "permeability",
 				each -> run(DesignEdits.remove("Remove permeability", each)));
@@ -105,6 +105,12 @@ public final class MaterialsPage extends MasterDetailPage {
 		button(buttons, "Derive from the curve…", this::deriveSaturation)
 				.setToolTipText("For want of a maker's figure: the flux density where the differential permeability has fallen to a fifth of its maximum");
 		loss = new LossPart(Headings.part(into, "Core loss", "Per volume, k·f^α·B^β in W/m³ with f in Hz and peak B in T, for a sine without bias."), this);
+	}
+
+	/** @param width least of a part that stands beside another, px */
+	private static Composite beside(Composite body, int width) {
+		((GridData) body.getParent().getLayoutData()).widthHint = width;
+		return body;
 	}
 
 	private static Button button(Composite parent, String text, Runnable action) {

@@ -33,27 +33,28 @@ final class PlotPart {
 
 	PlotPart(Composite parent) {
 		area = parent;
-		parent.setLayout(new GridLayout(3, false));
+		parent.setLayout(new GridLayout(2, false));
 		kind = new Combo(parent, SWT.READ_ONLY);
 		for (PlotKind each : PlotKind.values()) {
 			kind.add(each.label());
 		}
 		kind.select(0);
+		kind.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
 		kind.addListener(SWT.Selection, event -> refresh());
 		Accessibles.name(kind, "What the plot shows");
 		Label at = new Label(parent, SWT.NONE);
-		at.setText("at");
+		at.setText("at temperatures");
 		temperatures = new Text(parent, SWT.BORDER);
-		temperatures.setMessage("the temperatures given");
+		temperatures.setMessage("those given");
 		temperatures.setToolTipText(HINT);
 		temperatures.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
 		temperatures.addListener(SWT.Modify, event -> refresh());
 		Accessibles.name(temperatures, "Temperatures of the plot");
-		problem = new ProblemLine(parent, 3);
+		problem = new ProblemLine(parent, 2);
 		plot = new CurvePlot(parent);
-		GridData wide = new GridData(SWT.FILL, SWT.TOP, true, false, 3, 1);
+		GridData wide = new GridData(SWT.FILL, SWT.TOP, true, false, 2, 1);
 		wide.heightHint = 260;
-		wide.widthHint = 300;
+		wide.widthHint = 240;
 		plot.setLayoutData(wide);
 	}
 

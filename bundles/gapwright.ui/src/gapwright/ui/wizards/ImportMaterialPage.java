@@ -46,7 +46,9 @@ final class ImportMaterialPage extends WizardPage {
 	private Combo flux;
 	private Composite results;
 	private Composite good;
+	private Composite bad;
 	private Table problems;
+	private Text explanation;
 	private Link doubts;
 	private Text summary;
 	private CurvePlot plot;
@@ -124,13 +126,31 @@ final class ImportMaterialPage extends WizardPage {
 	}
 
 	private void createProblems() {
-		problems = new Table(results, SWT.BORDER | SWT.FULL_SELECTION);
+		bad = new Composite(results, SWT.NONE);
+		GridLayout grid = new GridLayout(1, false);
+		grid.marginWidth = 0;
+		bad.setLayout(grid);
+		problems = new Table(bad, SWT.BORDER | SWT.FULL_SELECTION);
+		problems.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
 		problems.setHeaderVisible(true);
+		problems.addListener(SWT.Selection, event -> explain());
 		column("Line", 60);
 		column("Column", 70);
-		column("Found", 300);
-		column("Allowed", 300);
+		column("Found", 330);
+		column("Allowed", 260);
 		Accessibles.name(problems, "What is wrong with the file");
+		explanation = new Text(bad, SWT.MULTI | SWT.WRAP | SWT.READ_ONLY);
+		GridData lines = new GridData(SWT.FILL, SWT.BOTTOM, true, false);
+		lines.heightHint = 4 * explanation.getLineHeight();
+		lines.widthHint = 560;
+		explanation.setLayoutData(lines);
+		Accessibles.name(explanation, "The chosen error");
+	}
+
+	/** The chosen error in full: its columns may be too narrow for it. */
+	private void explain() {
+		int chosen = problems.getSelectionIndex();
+		explanation.setText(chosen < 0 ? "" : reading.problems().get(chosen).toString());
 	}
 
 	private void column(String title, int width) {
@@ -187,12 +207,14 @@ final class ImportMaterialPage extends WizardPage {
 			trouble = count == 1 ? "The file has an error and is not read." : "The file has " + count + " errors and is not read.";
 			problems.removeAll();
 			reading.problems().forEach(this::row);
+			problems.select(0);
+			explain();
 		}
 		boolean read = reading != null && !refused;
 		summary.setText(read ? MaterialSummary.of(reading) : "");
 		plot.show(read ? reading.material() : null);
 		showDoubts(read ? reading.doubts() : List.of());
-		((StackLayout) results.getLayout()).topControl = refused ? problems : read ? good : null;
+		((StackLayout) results.getLayout()).topControl = refused ? bad : read ? good : null;
 		results.layout();
 		results.getParent().layout(true, true);
 		setErrorMessage(trouble);
