@@ -138,6 +138,7 @@ final class CanvasActions {
 			into.add(action("Align vertically\tV", () -> align(true)));
 			into.add(action("Align horizontally\tH", () -> align(false)));
 		}
+		into.add(action("Add leakage across windows…\tShift+W", this::leakage));
 		into.add(new Separator());
 		for (ActionFactory factory : new ActionFactory[] { ActionFactory.CUT, ActionFactory.COPY, ActionFactory.PASTE,
 				ActionFactory.DELETE, ActionFactory.SELECT_ALL }) {
@@ -165,6 +166,7 @@ final class CanvasActions {
 		character('g', SWT.SHIFT, () -> addOnLegs(Additions.Kind.GAP));
 		character('m', SWT.SHIFT, () -> addOnLegs(Additions.Kind.MAGNET));
 		character('c', SWT.SHIFT, () -> addOnLegs(Additions.Kind.COIL));
+		character('w', SWT.SHIFT, this::leakage);
 		character('r', 0, this::reverse);
 		character('v', 0, () -> align(true));
 		character('h', 0, () -> align(false));
@@ -305,6 +307,14 @@ final class CanvasActions {
 			run(air ? LegEdits.addAirPath(design(), from, to, added::add)
 					: LegEdits.add(design(), from, to, added::add));
 			select(added);
+		}
+	}
+
+	private void leakage() {
+		Edit edit = LeakageDrawing.ask(design(), page.selected(), viewer.getControl().getShell());
+		if (edit != null) {
+			viewer.deselectAll();
+			run(edit);
 		}
 	}
 

@@ -105,13 +105,18 @@ public final class PictureMaker {
 				int b = design.getJoints().indexOf(to);
 				int rank = between.merge(Math.min(a, b) + "-" + Math.max(a, b), 1, Integer::sum) - 1;
 				picture.add(path, AirPathLook.between(scale.pixels(Scene.x(from)), scale.pixels(Scene.y(from)),
-						scale.pixels(Scene.x(to)), scale.pixels(Scene.y(to)), scale.pixels(deviation(from, to, rank))));
+						scale.pixels(Scene.x(to)), scale.pixels(Scene.y(to)), scale.pixels(deviation(path, rank))));
 			}
 		}
 	}
 
-	/** How far an air path swings out, mm: clear of a leg between the same joints and its coils, inwards there. */
-	private double deviation(Joint from, Joint to, int rank) {
+	/**
+	 * How far an air path swings out, mm: clear of a leg between the same joints and its coils, inwards there. Leakage runs
+	 * straight across its window, as the field does.
+	 */
+	private double deviation(AirPath path, int rank) {
+		Joint from = path.getFrom();
+		Joint to = path.getTo();
 		double dx = Scene.x(to) - Scene.x(from);
 		double dy = Scene.y(to) - Scene.y(from);
 		double clear = 0;
@@ -123,6 +128,9 @@ public final class PictureMaker {
 		}
 		double inward = (middleX() - Scene.x(from)) * -dy + (middleY() - Scene.y(from)) * dx;
 		double free = FREE_SWING * Math.hypot(dx, dy);
+		if (path.isLeakage() && clear == 0) {
+			return rank * free / 2;
+		}
 		return (inward < 0 ? -1 : 1) * ((clear > 0 ? clear : free) + rank * free / 2);
 	}
 
