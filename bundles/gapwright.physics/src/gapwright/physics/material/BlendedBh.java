@@ -18,6 +18,8 @@ public record BlendedBh(BhCurve first, BhCurve second, double share) implements 
 
 	/** Halving alone comes to rounding in this many steps from any bracket met. */
 	private static final int MOST_STEPS = 200;
+	/** A Newton step this small beside the value leaves an error of its square, which is below rounding. */
+	private static final double QUADRATIC = 1e-10;
 
 	/** @throws IllegalArgumentException when the share is not from 0 to 1 */
 	public BlendedBh {
@@ -37,7 +39,7 @@ public record BlendedBh(BhCurve first, BhCurve second, double share) implements 
 		double b2 = second.fluxDensity(h);
 		double low = Math.min(b1, b2);
 		double high = Math.max(b1, b2);
-		double b = b1 + share * (b2 - b1);
+		double b = start(h, b1, b2);
 		for (int i = 0; i < MOST_STEPS && low < high; i++) {
 			double h1 = first.fieldStrength(b);
 			double h2 = second.fieldStrength(b);
@@ -51,15 +53,20 @@ public record BlendedBh(BhCurve first, BhCurve second, double share) implements 
 				low = b;
 			}
 			double next = b - error * slope(first.slope(h1), second.slope(h2));
-			if (!(next > low && next < high)) {
-				next = low + 0.5 * (high - low);
-			}
-			if (Math.abs(next - b) <= Math.ulp(b)) {
+			if (Math.abs(next - b) <= QUADRATIC * b) {
 				return next;
 			}
-			b = next;
+			b = next > low && next < high ? next : low + 0.5 * (high - low);
 		}
 		return b;
+	}
+
+	/** Where the tangents of both inverses at this field strength, blended, meet it. */
+	private double start(double h, double b1, double b2) {
+		double weight1 = (1 - share) / first.slope(h);
+		double weight2 = share / second.slope(h);
+		double b = (weight1 * b1 + weight2 * b2) / (weight1 + weight2);
+		return b >= Math.min(b1, b2) && b <= Math.max(b1, b2) ? b : b1 + share * (b2 - b1);
 	}
 
 	/** dB/dH from those of both curves at the same flux density: their weighted harmonic mean. */
@@ -101,6 +108,17 @@ public record BlendedBh(BhCurve first, BhCurve second, double share) implements 
 	public double fieldStrength(double b) {
 		double h1 = first.fieldStrength(b);
 		return h1 + share * (second.fieldStrength(b) - h1);
+	}
+
+	/**
+	 * Slope of the inverse, dH/dB, which takes no search as that of B(H) does.
+	 *
+	 * @param fluxDensity T
+	 * @return m/H; infinite where a table is flat
+	 */
+	public double fieldSlope(double fluxDensity) {
+		return (1 - share) / first.slope(first.fieldStrength(fluxDensity))
+				+ share / second.slope(second.fieldStrength(fluxDensity));
 	}
 
 	@Override

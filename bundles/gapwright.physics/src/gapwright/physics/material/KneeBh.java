@@ -75,4 +75,20 @@ public record KneeBh(double initialPermeability, double saturationPolarisation) 
 		}
 		return 0.5 * MU_0 * a * a + saturationPolarisation * saturationPolarisation / chi * (y - Math.log1p(y));
 	}
+
+	/** In closed form, the positive root of µ₀qH² + (µ₀ + χ − Bq)H − B = 0 with q = χ/Js, and a Newton step against rounding. */
+	@Override
+	public double fieldStrength(double b) {
+		if (b == 0) {
+			return 0;
+		}
+		double target = Math.abs(b);
+		double q = chi() / saturationPolarisation;
+		double p = MU_0 + chi() - target * q;
+		double root = Math.sqrt(p * p + 4 * MU_0 * q * target);
+		// the form without cancellation
+		double h = p > 0 ? 2 * target / (p + root) : (root - p) / (2 * MU_0 * q);
+		h -= (fluxDensity(h) - target) / slope(h);
+		return Math.copySign(h, b);
+	}
 }

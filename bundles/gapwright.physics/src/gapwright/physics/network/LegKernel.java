@@ -1,6 +1,7 @@
 package gapwright.physics.network;
 
 import gapwright.physics.material.BhCurve;
+import gapwright.physics.material.BlendedBh;
 
 /**
  * One leg under an imposed MMF f: finds H of H·l + R·A·B(H) = f, hence flux and its derivative. The left side rises
@@ -35,6 +36,9 @@ final class LegKernel {
 		if (reactive == 0) {
 			return Math.copySign(high, f);
 		}
+		if (curve instanceof BlendedBh blended) {
+			return Math.copySign(byFluxDensity(blended, target, length, reactive), f);
+		}
 		// the three terms of the defect are known no better; steps below that would wander without end
 		double rounding = 2 * Math.ulp(target);
 		double low = 0;
@@ -58,6 +62,38 @@ final class LegKernel {
 			h = next > low && next < high ? next : low + 0.5 * (high - low);
 		}
 		return Math.copySign(h, f);
+	}
+
+	/**
+	 * H(B)·l + R·A·B = f by its flux density: of a blend only H(B) comes without a search. Newton from above, where the
+	 * left side is convex for concave curves, halving where it leaves its bracket.
+	 */
+	private static double byFluxDensity(BlendedBh curve, double target, double length, double reactive) {
+		double rounding = 2 * Math.ulp(target);
+		double low = 0;
+		double high = target / reactive;
+		double b = high;
+		double h = curve.fieldStrength(b);
+		for (int i = 0; i < MOST_STEPS; i++) {
+			double defect = h * length + reactive * b - target;
+			if (Math.abs(defect) <= rounding) {
+				break;
+			}
+			if (defect > 0) {
+				high = b;
+			} else {
+				low = b;
+			}
+			double next = b - defect / (length * curve.fieldSlope(b) + reactive);
+			// a step this small leaves an error of its square, which is below rounding
+			boolean settled = Math.abs(next - b) <= 1e-10 * b;
+			b = settled || next > low && next < high ? next : low + 0.5 * (high - low);
+			h = curve.fieldStrength(b);
+			if (settled || !(high - low > Math.ulp(high))) {
+				break;
+			}
+		}
+		return h;
 	}
 
 	/** @return dφ/df, H: A·B′/(l + R·A·B′) */

@@ -19,7 +19,8 @@ class CurvesTest {
 			new ArctanBh(30000, 1.2), new ArctanBh(5, 0.4), new RollOffBh(60, 7500, 1.8), new RollOffBh(75, 4000, 1.3),
 			new RollOffBh(26, 20000, 2.5), new RollOffBh(125, 3000, 1.05), new TableBh(STEEL_H, STEEL_B),
 			new BlendedBh(new KneeBh(2300, 0.569), new KneeBh(3500, 0.438), 0.4),
-			new BlendedBh(new TableBh(STEEL_H, STEEL_B), new ArctanBh(900, 1.5), 0.7));
+			new BlendedBh(new TableBh(STEEL_H, STEEL_B), new ArctanBh(900, 1.5), 0.7),
+			new StretchedBh(new KneeBh(2300, 0.569), 1.3));
 	private static final double[] FIELDS = { 1e-3, 0.5, 7, 40, 190, 260, 900, 2500, 7000, 9000, 30000, 2e5, 3e6 };
 
 	@Test
