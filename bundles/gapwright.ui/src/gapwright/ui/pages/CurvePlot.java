@@ -66,7 +66,7 @@ public final class CurvePlot extends Canvas {
 		Rectangle all = getClientArea();
 		gc.setBackground(ThemeColours.PAPER.get());
 		gc.fillRectangle(all);
-		int below = picture == null || picture.kind() == PlotKind.FLUX_DENSITY ? 0 : rows() * gc.getFontMetrics().getHeight();
+		int below = picture == null || picture.kind() == PlotKind.FLUX_DENSITY ? 0 : rows(gc, all.width) * gc.getFontMetrics().getHeight();
 		Rectangle area = new Rectangle(LEFT, TOP, all.width - LEFT - RIGHT, all.height - TOP - BOTTOM - below);
 		gc.setForeground(ThemeColours.INK.get());
 		if (picture == null) {
@@ -166,24 +166,33 @@ public final class CurvePlot extends Canvas {
 		}
 	}
 
-	/** Lines of the legend below the axis, two names in each. */
-	private int rows() {
-		return (picture.lines().size() + 1) / 2;
+	/** Lines of the legend below the axis. */
+	private int rows(GC gc, int width) {
+		int columns = columns(gc, width);
+		return (picture.lines().size() + columns - 1) / columns;
+	}
+
+	/** Two names beside each other where they fit. */
+	private int columns(GC gc, int width) {
+		return 2 * (SAMPLE + widest(gc) + 20) <= width ? 2 : 1;
+	}
+
+	private int widest(GC gc) {
+		return picture.lines().stream().mapToInt(line -> gc.textExtent(line.name()).x).max().orElse(0);
 	}
 
 	/** Inside, below at the right, for rising curves; falling ones would cross it, so theirs stands below the axis. */
 	private void legend(GC gc, Rectangle area) {
 		int height = gc.getFontMetrics().getHeight();
-		int width = 0;
-		for (CurvePicture.Line line : picture.lines()) {
-			width = Math.max(width, gc.textExtent(line.name()).x);
-		}
+		int width = widest(gc);
+		int total = area.x + area.width + RIGHT;
+		int columns = columns(gc, total);
 		boolean inside = picture.kind() == PlotKind.FLUX_DENSITY;
 		int count = 0;
 		for (CurvePicture.Line line : picture.lines()) {
-			int x = inside ? area.x + area.width - width - SAMPLE - 16 : 8 + count % 2 * (area.x + area.width + RIGHT) / 2;
+			int x = inside ? area.x + area.width - width - SAMPLE - 16 : 8 + count % columns * total / 2;
 			int y = inside ? area.y + area.height - height * (picture.lines().size() - count) - 8
-					: area.y + area.height + BOTTOM - 2 + count / 2 * height;
+					: area.y + area.height + BOTTOM - 2 + count / columns * height;
 			count++;
 			style(gc, line);
 			gc.drawLine(x, y + height / 2, x + SAMPLE, y + height / 2);

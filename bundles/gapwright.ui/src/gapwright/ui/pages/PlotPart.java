@@ -53,7 +53,7 @@ final class PlotPart {
 		problem = new ProblemLine(parent, 2);
 		plot = new CurvePlot(parent);
 		GridData wide = new GridData(SWT.FILL, SWT.TOP, true, false, 2, 1);
-		wide.heightHint = 260;
+		wide.heightHint = 300;
 		wide.widthHint = 240;
 		plot.setLayoutData(wide);
 	}
