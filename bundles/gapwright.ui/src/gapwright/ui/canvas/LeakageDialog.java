@@ -17,6 +17,7 @@ import org.eclipse.swt.widgets.Spinner;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.TableColumn;
 import org.eclipse.swt.widgets.TableItem;
+import org.eclipse.ui.PlatformUI;
 
 import gapwright.study.leakage.FacingLegs;
 import gapwright.study.leakage.LeakageEstimate;
@@ -51,6 +52,7 @@ final class LeakageDialog extends TitleAreaDialog {
 	protected void configureShell(Shell shell) {
 		super.configureShell(shell);
 		shell.setText("Leakage across windows");
+		PlatformUI.getWorkbench().getHelpSystem().setHelp(shell, "gapwright.help.canvas");
 	}
 
 	@Override

@@ -10,6 +10,9 @@ import gapwright.model.Drive;
 import gapwright.model.Material;
 import gapwright.model.OperatingPoint;
 import gapwright.model.Winding;
+import gapwright.model.WindingConnection;
+import gapwright.model.WindingLeakage;
+import gapwright.ui.pages.CouplingsPage;
 import gapwright.ui.pages.MaterialsPage;
 import gapwright.ui.pages.OperatingPointsPage;
 import gapwright.ui.pages.WindingsPage;
@@ -19,17 +22,20 @@ import gapwright.ui.session.DesignSession;
 final class FormPages {
 
 	private final WindingsPage windings;
+	private final CouplingsPage couplings;
 	private final OperatingPointsPage points;
 	private final MaterialsPage materials;
 
 	FormPages(Composite parent, DesignSession session) {
 		windings = new WindingsPage(parent, session);
+		couplings = new CouplingsPage(parent, session);
 		points = new OperatingPointsPage(parent, session);
 		materials = new MaterialsPage(parent, session);
 	}
 
 	void addTo(BiConsumer<Control, String> adder) {
 		adder.accept(windings, "Windings");
+		adder.accept(couplings, "Couplings");
 		adder.accept(points, "Operating points");
 		adder.accept(materials, "Materials");
 	}
@@ -40,13 +46,17 @@ final class FormPages {
 			windings.reveal(element);
 			return 0;
 		}
+		if (element instanceof WindingLeakage || element instanceof WindingConnection) {
+			couplings.reveal(element);
+			return 1;
+		}
 		if (element instanceof OperatingPoint || element instanceof Drive) {
 			points.reveal(element);
-			return 1;
+			return 2;
 		}
 		if (element instanceof Material) {
 			materials.reveal(element);
-			return 2;
+			return 3;
 		}
 		return -1;
 	}
@@ -55,6 +65,7 @@ final class FormPages {
 	/** @param listener called when a page has chosen another element */
 	void onChoose(Runnable listener) {
 		windings.onChoose(listener);
+		couplings.onChoose(listener);
 		points.onChoose(listener);
 		materials.onChoose(listener);
 	}
@@ -63,6 +74,9 @@ final class FormPages {
 	EObject chosen(Control page) {
 		if (page == windings) {
 			return windings.chosen();
+		}
+		if (page == couplings) {
+			return couplings.chosen();
 		}
 		return page == points ? points.chosen() : page == materials ? materials.chosen() : null;
 	}

@@ -13,9 +13,13 @@ import gapwright.model.Coil;
 import gapwright.model.Gap;
 import gapwright.model.Leg;
 import gapwright.model.Winding;
+import gapwright.model.WindingConnection;
+import gapwright.model.WindingLeakage;
 import gapwright.study.AirPathResult;
+import gapwright.study.ConnectionResult;
 import gapwright.study.GapResult;
 import gapwright.study.InductanceMatrix;
+import gapwright.study.LeakageResult;
 import gapwright.study.LegResult;
 import gapwright.study.OperatingPointResult;
 import gapwright.study.WindingResult;
@@ -42,6 +46,12 @@ public final class ElementFigures {
 		}
 		if (element instanceof Winding winding) {
 			return find(point.windings(), r -> r.id().equals(winding.getId())).map(r -> winding(r, point.inductance())).orElse(List.of());
+		}
+		if (element instanceof WindingLeakage leakage) {
+			return find(point.leakages(), r -> r.id().equals(leakage.getId())).map(ElementFigures::leakage).orElse(List.of());
+		}
+		if (element instanceof WindingConnection connection) {
+			return find(point.connections(), r -> r.id().equals(connection.getId())).map(ElementFigures::connection).orElse(List.of());
 		}
 		if (element instanceof Coil coil) {
 			return of(coil.eContainer(), point);
@@ -88,6 +98,24 @@ public final class ElementFigures {
 						"Linkage over current; only where this winding alone carries current and no magnet acts."),
 				new Figure("Differential inductance", FigureFormat.si(own < 0 ? Double.NaN : matrix.differential()[own][own], "H"),
 						"Slope of the linkage over the current at this point, exact from the solved network; what the ripple sees."));
+	}
+
+	private static List<Figure> leakage(LeakageResult leakage) {
+		return List.of(
+				new Figure("Leakage inductance", FigureFormat.si(leakage.inductance(), "H"),
+						"Energy of the field between the windings, referred to the first one's turns; for evenly spread, balanced ampere-turns."),
+				new Figure("Rogowski factor K_R", FigureFormat.plain(leakage.rogowskiFactor()),
+						"How much the spreading of the field at the ends of the windings lowers it; Rogowski 1909."),
+				new Figure("Short-circuit inductance", FigureFormat.si(leakage.shortCircuit(), "H"),
+						"Seen at the first winding with the second short-circuited: the leakage, and what the drawn network adds by flux that links one winding only."),
+				new Figure("Coupling k", FigureFormat.plain(leakage.coupling()),
+						"Mutual over the root of both own inductances, with all the leakage on the first winding's side; negative where they oppose."));
+	}
+
+	private static List<Figure> connection(ConnectionResult connection) {
+		return List.of(new Figure("Inductance together", FigureFormat.si(connection.inductance(), "H"), connection.series()
+				? "In series: the sum of all own and mutual differential inductances, with the sense of each winding."
+				: "In parallel: from the inverse of the differential inductance matrix; what the common terminals see."));
 	}
 
 	private static <T> Optional<T> find(List<T> all, Predicate<T> wanted) {

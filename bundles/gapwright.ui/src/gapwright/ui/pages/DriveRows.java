@@ -5,6 +5,7 @@ import static gapwright.model.GapwrightPackage.Literals.CURRENT_DRIVE__RIPPLE;
 import static gapwright.model.GapwrightPackage.Literals.VOLTAGE_DRIVE__BIAS;
 import static gapwright.model.GapwrightPackage.Literals.VOLTAGE_DRIVE__ON_TIME;
 import static gapwright.model.GapwrightPackage.Literals.VOLTAGE_DRIVE__VOLTAGE;
+import static gapwright.model.GapwrightPackage.Literals.VOLTAGE_DRIVE__WAVEFORM;
 
 import java.util.ArrayList;
 import java.util.List;
@@ -95,7 +96,7 @@ final class DriveRows {
 			Composite fields = new Composite(area, SWT.NONE);
 			fields.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
 			form = new FeatureForm(fields, page.runner(), 3).add(CURRENT_DRIVE__CURRENT, CURRENT_DRIVE__RIPPLE, VOLTAGE_DRIVE__VOLTAGE,
-					VOLTAGE_DRIVE__ON_TIME, VOLTAGE_DRIVE__BIAS);
+					VOLTAGE_DRIVE__ON_TIME, VOLTAGE_DRIVE__BIAS, VOLTAGE_DRIVE__WAVEFORM);
 		}
 
 		private void connect() {
