@@ -54,7 +54,10 @@ class UserGuideTest {
 			NodeList links = parse(page).getElementsByTagName("a");
 			for (int i = 0; i < links.getLength(); i++) {
 				String target = links.item(i).getAttributes().getNamedItem("href").getNodeValue();
-				assertTrue(Files.exists(PAGES.resolve(target)), page + " links to " + target);
+				String[] parts = target.split("#", 2);
+				Path to = parts[0].isEmpty() ? page : PAGES.resolve(parts[0]);
+				assertTrue(Files.exists(to), page + " links to " + target);
+				assertTrue(parts.length == 1 || Files.readString(to).contains("id=\"" + parts[1] + "\""), page + " links to " + target);
 			}
 			NodeList pictures = parse(page).getElementsByTagName("img");
 			for (int i = 0; i < pictures.getLength(); i++) {
