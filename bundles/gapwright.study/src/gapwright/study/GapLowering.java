@@ -20,6 +20,9 @@ import gapwright.physics.gap.Section;
 /** Permeances of the gaps, with a finding wherever a method is used outside its validity. */
 final class GapLowering {
 
+	/** Width of a pole whose ends add nothing, m. */
+	private static final double ENDLESS = 1e9;
+
 	private final Findings findings;
 	private final Map<Joint, List<Leg>> byJoint;
 	private final Map<Gap, GapGeometry> geometries = new HashMap<>();
@@ -68,6 +71,7 @@ final class GapLowering {
 			findings.note("gap-square-assumed", Lowering.id(gap),
 					"the leg gives only an area, so its section is taken as a square of that area", "");
 		}
+		judgeYoke(leg, gap, geometry);
 		if (gap.getPlace() == GapPlace.BETWEEN_POLES && method == Fringing.CONFORMAL) {
 			findings.note("gap-in-open-air", Lowering.id(gap), "between poles in the open CONFORMAL reads the permeance low: "
 					+ (section instanceof Section.Round ? "7 % at a gap of 3 % of the diameter, 23 % at 20 %"
@@ -75,6 +79,34 @@ final class GapLowering {
 					"");
 		}
 		return true;
+	}
+
+	/**
+	 * CONFORMAL has the yoke go on beyond the pole on every side. Where it is no deeper than the pole, the field of the
+	 * faces out of the page is that of two poles alike, with half the distance to the mirror plane.
+	 */
+	private void judgeYoke(Leg leg, Gap gap, GapGeometry geometry) {
+		GapWindow window = windows.get(gap);
+		if (window == null || gap.getPlace() != GapPlace.AGAINST_YOKE || gap.getFringing() != gapwright.model.Fringing.CONFORMAL) {
+			return;
+		}
+		Leg bar = window.toFirst() < window.toSecond() ? window.firstBar() : window.secondBar();
+		if (bar == null || !(depth(bar) < depth(leg) + 2 * geometry.length())) {
+			return;
+		}
+		Section faces = new Section.Rectangular(ENDLESS, depth(leg));
+		double half = geometry.firstPole() + geometry.length() / 2;
+		double wide = Fringing.CONFORMAL.factor(new GapGeometry(faces, geometry.length(), 1, geometry.place(), geometry.toFirst(),
+				geometry.toSecond())).value();
+		double flush = Fringing.CONFORMAL.factor(new GapGeometry(faces, geometry.length(), 1, GapGeometry.Place.BETWEEN_POLES, half, half)).value();
+		findings.note("gap-yoke-not-wider", Lowering.id(gap), "the yoke '" + Lowering.id(bar) + "' is " + Figures.millimetres(depth(bar))
+				+ " deep, the pole " + Figures.millimetres(depth(leg))
+				+ ": CONFORMAL takes it as wider on every side and reads the permeance up to " + Figures.perCent(wide / flush - 1) + " high",
+				"Expect less inductance by up to the gap's share of it.");
+	}
+
+	private static double depth(Leg leg) {
+		return leg.getShape() == SectionShape.RECTANGULAR ? LegGeometry.si(leg.getDepth()) : LegGeometry.drawnWidth(leg);
 	}
 
 	private boolean judge(Gap gap, Fringing method, GapGeometry geometry) {

@@ -14,6 +14,9 @@ final class Pairs {
 	/** Part of a diagonal by which two windings may differ from being one and the same for small changes. */
 	private static final double ALIKE = 1e-9;
 
+	/** Below this two windings round one leg are not wound as usual, or not as drawn (common practice). */
+	private static final double USUAL_COUPLING = 0.9;
+
 	private final StudyInput input;
 	private final String point;
 	private final Findings findings;
@@ -36,9 +39,14 @@ final class Pairs {
 			double uncoupled = inductance[i][i] - mutual * mutual / inductance[j][j];
 			// windings round one leg share all its flux: what is left is rounding
 			double drawn = uncoupled > TOO_TIGHT * inductance[i][i] ? uncoupled : 0;
+			double coupling = mutual / Math.sqrt((inductance[i][i] + own) * inductance[j][j]);
+			if (Math.abs(coupling) < USUAL_COUPLING) {
+				findings.add(new Finding(Severity.NOTE, "coupling-low", data.id(), point,
+						"the windings couple with " + Figures.of(coupling) + ", round one leg 0.98 to 0.999 are usual",
+						"Check the sizes, or interleave the windings."));
+			}
 			results.add(new LeakageResult(data.id(), input.windings.get(i).id(), input.windings.get(j).id(), own,
-					data.pair().rogowskiFactor(), own + drawn,
-					mutual / Math.sqrt((inductance[i][i] + own) * inductance[j][j])));
+					data.pair().rogowskiFactor(), own + drawn, coupling));
 		}
 		return results;
 	}

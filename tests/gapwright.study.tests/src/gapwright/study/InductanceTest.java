@@ -95,6 +95,18 @@ class InductanceTest {
 		assertTrue(point(refused).leakages().isEmpty());
 	}
 
+	/** Windings with 0.98 to 0.999 are usual round one leg (common practice); a fifth of the inductance as leakage is not. */
+	@Test
+	void aLowCouplingIsNoted() {
+		String loose = "<leakages id=\"between\" first=\"main\" second=\"twin\" firstBuild=\"3 mm\" secondBuild=\"3 mm\""
+				+ " separation=\"SEPARATION\" height=\"30 mm\" meanTurn=\"80 mm\"/>";
+		StudyResult tight = Designs.study(END, TWIN + loose.replace("SEPARATION", "0.1 mm") + END);
+		StudyResult apart = Designs.study(END, TWIN + loose.replace("SEPARATION", "22 mm") + END);
+		assertTrue(point(tight).leakages().get(0).coupling() > 0.9 && point(apart).leakages().get(0).coupling() < 0.9);
+		assertTrue(tight.findings().stream().noneMatch(f -> f.code().equals("coupling-low")));
+		assertTrue(apart.findings().stream().anyMatch(f -> f.code().equals("coupling-low") && f.subject().equals("between")));
+	}
+
 	@Test
 	void inductanceFactorIsInductancePerTurnSquared() {
 		OperatingPointResult p = point(Designs.study());
