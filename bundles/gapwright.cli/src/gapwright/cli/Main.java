@@ -14,7 +14,7 @@ import java.util.List;
 public final class Main {
 
 	private static final String HELP = """
-			usage: gapwright check FILE… [--json | --csv]
+			usage: gapwright check FILE… [--json | --csv] [--tolerances [--samples N] [--seed S]]
 			       gapwright sweep FILE… [--winding ID] [--point ID] [--from A] [--to A] [--steps N] [--json | --csv]
 			       gapwright library [FILE… [--field-unit U] [--flux-unit U]]
 			       gapwright --help | --version
@@ -22,6 +22,9 @@ public final class Main {
 			check   computes every design at all its operating points and judges each leg against saturation
 			        --json   one JSON object a line and file, SI units
 			        --csv    one line per leg and operating point, SI units
+			        --tolerances  also what the design's tolerances do: slopes, corners, samples
+			        --samples N   how many samples to draw; left out: 10000
+			        --seed S      the same seed draws the same samples; left out: 1
 			sweep   inductance and flux densities against the current of a winding, the others held
 			        --winding ID  what is swept; left out: the winding with the most current
 			        --point ID    operating point whose temperature and other currents hold; left out: the first

@@ -19,6 +19,7 @@ import gapwright.study.LegState;
 import gapwright.study.OperatingPointResult;
 import gapwright.study.StudyResult;
 import gapwright.study.WindingResult;
+import gapwright.study.tolerance.ToleranceResult;
 
 /** The result of a check as one JSON object on one line: SI units, numbers with full precision, null for no number. */
 public final class CheckJson {
@@ -34,16 +35,21 @@ public final class CheckJson {
 	 * @param version of the tool
 	 */
 	public static String of(StudyResult result, String file, String version) {
+		return of(result, null, file, version);
+	}
+
+	/** @param tolerances what they do, or null when that was not asked for */
+	public static String of(StudyResult result, ToleranceResult tolerances, String file, String version) {
 		StringWriter text = new StringWriter();
 		try (JsonWriter json = new JsonWriter(text)) {
-			new CheckJson(json).write(result, file, version);
+			new CheckJson(json).write(result, tolerances, file, version);
 		} catch (IOException e) {
 			throw new UncheckedIOException(e);
 		}
 		return text.toString();
 	}
 
-	private void write(StudyResult result, String file, String version) throws IOException {
+	private void write(StudyResult result, ToleranceResult tolerances, String file, String version) throws IOException {
 		json.beginObject();
 		json.name("tool").value("gapwright").name("version").value(version).name("file").value(file);
 		json.name("design").value(result.design()).name("worst").value(worst(result));
@@ -51,7 +57,11 @@ public final class CheckJson {
 		for (OperatingPointResult point : result.operatingPoints()) {
 			operatingPoint(point);
 		}
-		json.endArray().name("findings").beginArray();
+		json.endArray();
+		if (tolerances != null) {
+			ToleranceReport.write(json, tolerances);
+		}
+		json.name("findings").beginArray();
 		for (Finding finding : result.findings()) {
 			json.beginObject().name("severity").value(finding.severity().name().toLowerCase(Locale.ROOT));
 			json.name("code").value(finding.code()).name("subject").value(finding.subject());

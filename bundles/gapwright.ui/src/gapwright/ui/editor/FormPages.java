@@ -9,12 +9,14 @@ import org.eclipse.swt.widgets.Control;
 import gapwright.model.Drive;
 import gapwright.model.Material;
 import gapwright.model.OperatingPoint;
+import gapwright.model.Tolerance;
 import gapwright.model.Winding;
 import gapwright.model.WindingConnection;
 import gapwright.model.WindingLeakage;
 import gapwright.ui.pages.CouplingsPage;
 import gapwright.ui.pages.MaterialsPage;
 import gapwright.ui.pages.OperatingPointsPage;
+import gapwright.ui.pages.TolerancesPage;
 import gapwright.ui.pages.WindingsPage;
 import gapwright.ui.session.DesignSession;
 
@@ -25,12 +27,14 @@ final class FormPages {
 	private final CouplingsPage couplings;
 	private final OperatingPointsPage points;
 	private final MaterialsPage materials;
+	private final TolerancesPage tolerances;
 
 	FormPages(Composite parent, DesignSession session) {
 		windings = new WindingsPage(parent, session);
 		couplings = new CouplingsPage(parent, session);
 		points = new OperatingPointsPage(parent, session);
 		materials = new MaterialsPage(parent, session);
+		tolerances = new TolerancesPage(parent, session);
 	}
 
 	void addTo(BiConsumer<Control, String> adder) {
@@ -38,6 +42,7 @@ final class FormPages {
 		adder.accept(couplings, "Couplings");
 		adder.accept(points, "Operating points");
 		adder.accept(materials, "Materials");
+		adder.accept(tolerances, "Tolerances");
 	}
 
 	/** Chooses the element on its page; answers the page's place among these, or −1 when it belongs on the canvas. */
@@ -58,6 +63,10 @@ final class FormPages {
 			materials.reveal(element);
 			return 3;
 		}
+		if (element instanceof Tolerance) {
+			tolerances.reveal(element);
+			return 4;
+		}
 		return -1;
 	}
 
@@ -68,6 +77,7 @@ final class FormPages {
 		couplings.onChoose(listener);
 		points.onChoose(listener);
 		materials.onChoose(listener);
+		tolerances.onChoose(listener);
 	}
 
 	/** What a page has chosen; null when the control is none of these. */
@@ -78,6 +88,7 @@ final class FormPages {
 		if (page == couplings) {
 			return couplings.chosen();
 		}
-		return page == points ? points.chosen() : page == materials ? materials.chosen() : null;
+		return page == points ? points.chosen() : page == materials ? materials.chosen()
+				: page == tolerances ? tolerances.chosen() : null;
 	}
 }
