@@ -115,6 +115,36 @@ class ToleranceTest {
 		assertEquals(20000, Arrays.stream(band.samples().histogram(17)).sum());
 	}
 
+	/**
+	 * One uniform tolerance on a linear core: every tenth of the range holds a tenth of the samples, within four standard
+	 * errors, and no sample comes twice, from block to block either.
+	 */
+	@Test
+	void samplesAreSpreadEvenlyAndIndependentOfOneAnother() {
+		String knee = "<curve xsi:type=\"gapwright:KneeCurve\" initialPermeability=\"2300.0\" saturationPolarisation=\"0.569 T\"/>";
+		ToleranceResult result = run("<tolerances id=\"load\" targets=\"main\" feature=\"CURRENT\" deviation=\"50 %\"/>", 40000, 11, knee,
+				"<curve xsi:type=\"gapwright:LinearCurve\" relativePermeability=\"2300\"/>", " ripple=\"4 A\"", "");
+		Band band = utilisation(result);
+		double low = band.cornerLow();
+		double width = band.cornerHigh() - low;
+		for (int tenth = 1; tenth < 10; tenth++) {
+			double p = 1 - band.samples().probabilityFrom(low + tenth * width / 10);
+			assertEquals(tenth / 10.0, p, 4 * Math.sqrt(0.25 / 40000), "up to " + tenth);
+		}
+		int[] fine = band.samples().histogram(100);
+		double chiSquare = 0;
+		for (int count : fine) {
+			chiSquare += (count - 400.0) * (count - 400.0) / 400;
+		}
+		// 99 degrees of freedom: 99.9 % lie below 148.2 (table of chi-square)
+		assertTrue(chiSquare < 148.2 && chiSquare > 60, "chi-square " + chiSquare);
+		int twice = 0;
+		for (int i = 1; i < 40000; i++) {
+			twice += band.samples().quantile(i / 39999.0) == band.samples().quantile((i - 1) / 39999.0) ? 1 : 0;
+		}
+		assertTrue(twice < 5, twice + " samples come twice");
+	}
+
 	@Test
 	void targetsOfOneToleranceDeviateTogether() {
 		ToleranceResult together = run("<tolerances id=\"w\" targets=\"wound back\" feature=\"DEPTH\" deviation=\"5 %\"/>", 0, 0);

@@ -15,9 +15,6 @@ import gapwright.study.vary.DesignNumbers;
 final class MonteCarlo {
 
 	private static final int BLOCK = 500;
-	/** Odd, with its bits spread: blocks of neighbouring numbers have unlike seeds. */
-	private static final long SPREAD = 0x9E3779B97F4A7C15L;
-
 	/** Figures × samples; NaN where a sample has no solution. */
 	final double[][] values;
 	final int failed;
@@ -25,11 +22,15 @@ final class MonteCarlo {
 	MonteCarlo(PointRun run, ToleranceRequest request, Progress progress) {
 		values = new double[run.figureCount()][request.samples()];
 		int blocks = (request.samples() + BLOCK - 1) / BLOCK;
+		SplittableRandom whole = new SplittableRandom(request.seed());
+		// split one after another, so that each block's generator is the same on any number of threads
+		SplittableRandom[] random = new SplittableRandom[blocks];
+		Arrays.setAll(random, block -> whole.split());
 		AtomicInteger done = new AtomicInteger();
 		AtomicInteger failures = new AtomicInteger();
 		IntStream.range(0, blocks).parallel().forEach(block -> {
 			if (!progress.cancelled()) {
-				failures.addAndGet(block(run, request, block));
+				failures.addAndGet(block(run, request, block, random[block]));
 				int count = done.incrementAndGet();
 				synchronized (this) {
 					progress.done((double) count / blocks);
@@ -40,8 +41,7 @@ final class MonteCarlo {
 		failed = failures.get();
 	}
 
-	private int block(PointRun run, ToleranceRequest request, int block) {
-		SplittableRandom random = new SplittableRandom(request.seed() ^ (block + 1) * SPREAD);
+	private int block(PointRun run, ToleranceRequest request, int block, SplittableRandom random) {
 		double[] figures = new double[values.length];
 		DesignNumbers numbers = run.numbers(new double[run.deviations().size()]);
 		int failures = 0;

@@ -68,6 +68,10 @@ public record Axis(String title, String unit, double from, double to) {
 
 	private int prefix() {
 		double size = Math.max(Math.abs(from), Math.abs(to));
+		if (unit.equals("T") && size >= 1e-2) {
+			// legs of a core compare at a glance
+			return UNITY;
+		}
 		int exponent = unit.isEmpty() || size == 0 ? 0 : (int) Math.floor(Math.log10(size) / 3 + 1e-9);
 		return Math.max(0, Math.min(PREFIXES.length - 1, UNITY + exponent));
 	}

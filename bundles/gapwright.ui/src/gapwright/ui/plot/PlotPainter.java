@@ -81,6 +81,8 @@ public final class PlotPainter {
 		names();
 		if (!Double.isNaN(cursor) && plot.x().share(cursor) >= 0 && plot.x().share(cursor) <= 1) {
 			readOut(cursor);
+		} else {
+			spotNames();
 		}
 	}
 
@@ -140,8 +142,16 @@ public final class PlotPainter {
 		double up = plot.y().share(spot.y());
 		if (share >= 0 && share <= 1 && up >= 0 && up <= 1) {
 			pen.disc(px(spot.x()), py(spot.y()), 4, Tone.PAPER, spot.tone(), 2);
-			boolean right = share < 0.75;
-			pen.text(spot.name(), px(spot.x()) + (right ? 8 : -8), py(spot.y()) + 14, right ? Align.START : Align.END, TEXT, false, spot.tone());
+		}
+	}
+
+	/** In the line of the heading, where they hide nothing; the read-out takes their place. */
+	private void spotNames() {
+		double at = x + width;
+		for (int i = plot.spots().size() - 1; i >= 0; i--) {
+			Plot.Spot spot = plot.spots().get(i);
+			pen.text(spot.name(), at, y - 10, Align.END, TEXT, false, spot.tone());
+			at -= pen.textWidth(spot.name(), TEXT, false) + 16;
 		}
 	}
 
