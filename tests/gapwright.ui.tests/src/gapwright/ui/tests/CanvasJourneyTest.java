@@ -19,13 +19,16 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 
 import gapwright.library.template.Template;
+import gapwright.model.AirPath;
 import gapwright.model.Design;
 import gapwright.model.DesignWriter;
 import gapwright.model.Gap;
 import gapwright.model.Joint;
 import gapwright.model.Leg;
 import gapwright.study.LegResult;
+import gapwright.ui.canvas.CanvasModel;
 import gapwright.ui.canvas.CanvasPage;
+import gapwright.ui.canvas.looks.AirPathLook;
 import gapwright.ui.canvas.parts.ElementPart;
 import gapwright.ui.editor.DesignEditor;
 
@@ -232,5 +235,30 @@ class CanvasJourneyTest {
 		double inset = 14 / editor.getAdapter(CanvasPage.class).canvas().scale().pixelsPerMillimetre();
 		mouse.dragAndDrop(x(right.getTo()), y(right.getTo()) - 3.5 - inset, x(middle), y(middle));
 		assertEquals(middle, right.getTo());
+	}
+
+	@Test
+	void anAirPathsEndIsDraggedToAnotherJoint() throws Exception {
+		open("coupled-choke.gapwright");
+		byte[] before = bytes();
+		AirPath path = design().getAirPaths().get(0);
+		double[] middle = onCurve(path, true, 1e9);
+		mouse.click(middle[0], middle[1]);
+		assertEquals(List.of(path), editor.getAdapter(CanvasPage.class).selected());
+		Pictures.of(Workbench.shell(), "air-path-selected");
+		double[] end = onCurve(path, false, 14);
+		Joint other = leg("centre-leg").getTo();
+		mouse.dragAndDrop(end[0], end[1], x(other), y(other));
+		assertEquals(other, path.getTo());
+		assertEquals("Re-attach air path", editor.session().history().undoLabel());
+		Workbench.key('z', SWT.MOD1);
+		assertArrayEquals(before, bytes());
+	}
+
+	/** A point of an air path as drawn, mm. */
+	private double[] onCurve(AirPath path, boolean first, double pixels) {
+		CanvasModel canvas = editor.getAdapter(CanvasPage.class).canvas();
+		double[] at = ((AirPathLook) canvas.picture().look(path)).near(first, pixels);
+		return new double[] { canvas.scale().millimetres(at[0]), canvas.scale().millimetres(at[1]) };
 	}
 }

@@ -27,6 +27,23 @@ public record AirPathLook(double[] curve) implements Look {
 		return new AirPathLook(curve);
 	}
 
+	/**
+	 * @param first    which end
+	 * @param distance from that end, pixels, at most a quarter of the way
+	 * @return x and y of a point on the curve
+	 */
+	public double[] near(boolean first, double distance) {
+		int last = curve.length / 2 - 1;
+		int end = first ? 0 : last;
+		int step = first ? 1 : -1;
+		int at = end;
+		while (Math.abs(at - end) < last / 4
+				&& Math.hypot(curve[2 * at] - curve[2 * end], curve[2 * at + 1] - curve[2 * end + 1]) < distance) {
+			at += step;
+		}
+		return new double[] { curve[2 * at], curve[2 * at + 1] };
+	}
+
 	@Override
 	public double[] bounds() {
 		return Shapes.bounds(3, curve);

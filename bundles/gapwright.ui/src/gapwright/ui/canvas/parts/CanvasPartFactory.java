@@ -4,6 +4,7 @@ import org.eclipse.emf.ecore.EObject;
 import org.eclipse.gef.EditPart;
 import org.eclipse.gef.EditPartFactory;
 
+import gapwright.model.AirPath;
 import gapwright.model.Design;
 import gapwright.model.Leg;
 import gapwright.ui.canvas.CanvasModel;
@@ -21,6 +22,9 @@ public final class CanvasPartFactory implements EditPartFactory {
 	public EditPart createEditPart(EditPart context, Object model) {
 		if (model instanceof Design) {
 			return new DesignPart(canvas);
+		}
+		if (model instanceof AirPath path) {
+			return new AirPathPart(canvas, path);
 		}
 		return model instanceof Leg leg ? new LegPart(canvas, leg) : new ElementPart(canvas, (EObject) model);
 	}

@@ -2,9 +2,7 @@ package gapwright.ui.canvas.policies;
 
 import org.eclipse.draw2d.Cursors;
 import org.eclipse.draw2d.Graphics;
-import org.eclipse.draw2d.geometry.Dimension;
 import org.eclipse.draw2d.geometry.Point;
-import org.eclipse.draw2d.geometry.Rectangle;
 import org.eclipse.gef.DragTracker;
 import org.eclipse.gef.handles.AbstractHandle;
 
@@ -12,7 +10,6 @@ import gapwright.ui.canvas.looks.LegLook;
 import gapwright.ui.canvas.parts.LegPart;
 import gapwright.ui.canvas.tools.EndDrag;
 import gapwright.ui.canvas.tools.WidthDrag;
-import gapwright.ui.fields.ThemeColours;
 
 /** A small square on a selected leg. */
 public final class LegHandle extends AbstractHandle {
@@ -21,8 +18,6 @@ public final class LegHandle extends AbstractHandle {
 	public enum Place {
 		FROM, TO, LEFT_WALL, RIGHT_WALL
 	}
-
-	private static final int SIZE = 9;
 
 	private final Place place;
 
@@ -33,11 +28,11 @@ public final class LegHandle extends AbstractHandle {
 				Point at = position(look, place);
 				part.getFigure().translateToAbsolute(at);
 				target.translateToRelative(at);
-				target.setBounds(new Rectangle(at.x - SIZE / 2, at.y - SIZE / 2, SIZE, SIZE));
+				target.setBounds(HandleBox.around(at));
 			}
 		});
 		this.place = place;
-		setPreferredSize(new Dimension(SIZE, SIZE));
+		setPreferredSize(HandleBox.SIZE, HandleBox.SIZE);
 		setCursor(place == Place.FROM || place == Place.TO ? Cursors.CROSS : Cursors.SIZEALL);
 	}
 
@@ -47,7 +42,7 @@ public final class LegHandle extends AbstractHandle {
 		double dy = axis[3] - axis[1];
 		double length = Math.max(1e-9, Math.hypot(dx, dy));
 		double half = look.width() / 2;
-		double inset = Math.min(14, length / 4);
+		double inset = Math.min(HandleBox.INSET, length / 4);
 		return switch (place) {
 		case FROM -> point(axis[0] + inset * dx / length, axis[1] + inset * dy / length);
 		case TO -> point(axis[2] - inset * dx / length, axis[3] - inset * dy / length);
@@ -72,11 +67,6 @@ public final class LegHandle extends AbstractHandle {
 
 	@Override
 	protected void paintFigure(Graphics graphics) {
-		Rectangle box = getBounds().getCopy();
-		graphics.setBackgroundColor(ThemeColours.PAPER.get());
-		graphics.fillRectangle(box);
-		graphics.setForegroundColor(ThemeColours.SELECTION.get());
-		graphics.setLineWidth(2);
-		graphics.drawRectangle(box.x + 1, box.y + 1, box.width - 3, box.height - 3);
+		HandleBox.paint(graphics, getBounds().getCopy());
 	}
 }
