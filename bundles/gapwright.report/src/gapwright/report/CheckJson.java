@@ -19,6 +19,9 @@ import gapwright.study.LegState;
 import gapwright.study.OperatingPointResult;
 import gapwright.study.StudyResult;
 import gapwright.study.WindingResult;
+import gapwright.study.provenance.FigureGroup;
+import gapwright.study.provenance.Origin;
+import gapwright.study.provenance.Provenance;
 import gapwright.study.tolerance.ToleranceResult;
 
 /** The result of a check as one JSON object on one line: SI units, numbers with full precision, null for no number. */
@@ -68,7 +71,20 @@ public final class CheckJson {
 			json.name("operatingPoint").value(finding.operatingPoint());
 			json.name("message").value(finding.message()).name("hint").value(finding.hint()).endObject();
 		}
-		json.endArray().endObject();
+		json.endArray();
+		sources();
+		json.endObject();
+	}
+
+	/** Where the figures come from, by the place they stand at: "legs.flux". */
+	private void sources() throws IOException {
+		json.name("source").beginObject();
+		for (FigureGroup group : FigureGroup.values()) {
+			Origin origin = Provenance.of(group);
+			json.name(group.key()).beginObject().name("formula").value(origin.formula());
+			json.name("source").value(origin.source()).name("validity").value(origin.validity()).endObject();
+		}
+		json.endObject();
 	}
 
 	/** @return null when something is not computed: nobody shall read "within" out of a result that is not whole */

@@ -123,6 +123,17 @@ class PropertiesJourneyTest {
 	}
 
 	@Test
+	void everyFigureHasFormulaSourceValidityAndTheInputsUsed() {
+		show(centre(), "Where from");
+		assertTrue(Forms.says("B = Φ/(gross area × stacking factor)"));
+		assertTrue(Forms.says("Source: Ampère's and Gauss's laws"));
+		assertTrue(Forms.says("Valid: No hysteresis"));
+		assertTrue(Forms.says("12 mm"), "the width that was typed");
+		assertTrue(Forms.says("Knee, µi 2300.0, Js 0.438 T"), "the hot curve");
+		Pictures.of(Workbench.shell(), "where-from");
+	}
+
+	@Test
 	void withNothingSelectedTheDesignItselfIsShown() {
 		editor.reveal(centre());
 		editor.session().selection().select(List.of(), this);
