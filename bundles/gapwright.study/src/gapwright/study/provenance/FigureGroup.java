@@ -68,7 +68,7 @@ public enum FigureGroup {
 
 	SENSITIVITY("sensitivity", "Sensitivity", "dy/dp by the adjoint of the solved network: one factorisation for all", "Implicit function theorem; exact",
 			"At this point; at a knot of a table the second derivative is one-sided."),
-	TOLERANCE("tolerance", "Tolerance band", "First order Σ|dy/dp|·δ; corners; Monte Carlo with its standard error", "Elementary statistics",
+	TOLERANCE("tolerances", "Tolerance band", "First order Σ|dy/dp|·δ; corners; Monte Carlo with its standard error", "Elementary statistics",
 			"Corners are the extremes only where the figure rises or falls throughout; normal samples are cut off at ±δ = 3σ.");
 
 	private final String key;
