@@ -36,6 +36,9 @@ final class SweepCommand {
 	int run(List<String> arguments) throws UsageException {
 		Options options = new Options("sweep", arguments, Set.of("--json", "--csv"),
 				Set.of("--winding", "--point", "--from", "--to", "--steps"));
+		if (options.has("--csv") && options.files().size() > 1) {
+			throw new UsageException("sweep: --csv takes one file, for the columns differ from design to design");
+		}
 		int steps = options.whole("--steps", STEPS, 1, SweepRequest.MOST_STEPS);
 		Quantity from = current(options, "--from");
 		Quantity to = current(options, "--to");
@@ -67,7 +70,7 @@ final class SweepCommand {
 			String point = point(input, options.value("--point"));
 			String winding = winding(input, point, options.value("--winding"));
 			double start = from == null ? 0 : from.si();
-			double end = to == null ? BEYOND * input.largestCurrent(winding) : to.si();
+			double end = to == null ? BEYOND * BiasSweep.largestCurrent(input, winding) : to.si();
 			if (start == end) {
 				throw new IllegalArgumentException("nothing to sweep from " + start + " A to " + end + " A; give --to");
 			}

@@ -159,6 +159,10 @@ public final class CheckJson {
 			for (String winding : connection.windings()) {
 				json.value(winding);
 			}
+			json.endArray().name("reversed").beginArray();
+			for (boolean reversed : connection.reversed()) {
+				json.value(reversed);
+			}
 			json.endArray();
 			number("inductance", connection.inductance());
 			json.endObject();

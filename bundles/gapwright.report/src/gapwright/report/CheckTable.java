@@ -1,6 +1,8 @@
 package gapwright.report;
 
 import java.util.Locale;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 
 import gapwright.study.ConnectionResult;
 import gapwright.study.Finding;
@@ -95,7 +97,7 @@ public final class CheckTable {
 				String second = point.windings().get(j).id();
 				pairs.row(first + ", " + second,
 						Engineering.of(point.inductance().differential()[i][j], "H", DIGITS),
-						String.format(Locale.ROOT, "%.4f", point.inductance().coupling(first, second)),
+						ratio(point.inductance().coupling(first, second)),
 						Engineering.of(point.inductance().leakage(first, second), "H", DIGITS));
 			}
 		}
@@ -104,18 +106,28 @@ public final class CheckTable {
 		for (LeakageResult leakage : point.leakages()) {
 			leakages.row(leakage.id() + " of " + leakage.first() + " to " + leakage.second(),
 					Engineering.of(leakage.inductance(), "H", DIGITS), Engineering.of(leakage.shortCircuit(), "H", DIGITS),
-					String.format(Locale.ROOT, "%.4f", leakage.coupling()));
+					ratio(leakage.coupling()));
 		}
 		leakages.appendTo(text, "    ");
 		TextTable connections = new TextTable().row("connection", "joined", "L");
 		for (ConnectionResult connection : point.connections()) {
-			connections.row(connection.id() + ": " + String.join(", ", connection.windings()),
+			connections.row(connection.id() + ": " + members(connection),
 					connection.series() ? "in series" : "in parallel", Engineering.of(connection.inductance(), "H", DIGITS));
 		}
 		connections.appendTo(text, "    ");
 	}
 
-	private static String tesla(double value) {
+	private static String members(ConnectionResult connection) {
+		return IntStream.range(0, connection.windings().size())
+				.mapToObj(i -> connection.windings().get(i) + (connection.isReversed(i) ? " reversed" : ""))
+				.collect(Collectors.joining(", "));
+	}
+
+	private static String ratio(double value) {
+		return Double.isFinite(value) ? String.format(Locale.ROOT, "%.4f", value) : "–";
+	}
+
+	static String tesla(double value) {
 		return Double.isFinite(value) ? String.format(Locale.ROOT, "%.4f T", value) : "–";
 	}
 }

@@ -5,7 +5,6 @@ import java.io.StringWriter;
 import java.io.UncheckedIOException;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.stream.Collectors;
 
 import com.google.gson.stream.JsonWriter;
@@ -32,7 +31,7 @@ public final class SweepReport {
 			int at = i;
 			List<String> row = new ArrayList<>(List.of(Engineering.of(sweep.current()[i], "A", DIGITS),
 					Engineering.of(sweep.differential()[i], "H", DIGITS), Engineering.of(sweep.apparent()[i], "H", DIGITS)));
-			sweep.legs().forEach(leg -> row.add(String.format(Locale.ROOT, "%.4f T", leg.fluxDensity()[at])));
+			sweep.legs().forEach(leg -> row.add(CheckTable.tesla(leg.fluxDensity()[at])));
 			rows.row(row.toArray(String[]::new));
 		}
 		rows.appendTo(text, "    ");

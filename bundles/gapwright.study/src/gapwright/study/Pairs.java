@@ -1,6 +1,7 @@
 package gapwright.study;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 import gapwright.model.check.Severity;
@@ -9,8 +10,7 @@ import gapwright.physics.network.Solution;
 /** Leakages and connections at one operating point, from the inductance matrix there. */
 final class Pairs {
 
-	/** 1 − k² below which too few digits of a difference are left. */
-	private static final double TOO_TIGHT = 1e-9;
+	private static final double TOO_TIGHT = InductanceMatrix.TOO_TIGHT;
 	/** Part of a diagonal by which two windings may differ from being one and the same for small changes. */
 	private static final double ALIKE = 1e-9;
 
@@ -27,6 +27,30 @@ final class Pairs {
 		this.point = point;
 		this.findings = findings;
 		inductance = solution.differentialInductance();
+	}
+
+	/** Where windings share all their flux, the difference that is their leakage has no digits left. */
+	void noteSharedFlux() {
+		for (int i = 0; i < inductance.length; i++) {
+			List<String> others = new ArrayList<>();
+			for (int j = i + 1; j < inductance.length; j++) {
+				double both = inductance[i][i] * inductance[j][j];
+				boolean shared = both > 0 && 1 - inductance[i][j] * inductance[i][j] / both < TOO_TIGHT;
+				if (shared && !hasLeakage(i, j)) {
+					others.add("'" + input.windings().get(j).id() + "'");
+				}
+			}
+			if (!others.isEmpty() && input.windings().get(i).whole()) {
+				findings.add(new Finding(Severity.NOTE, "coupling-complete", input.windings().get(i).id(), null,
+						"it shares all flux of the drawn network with " + String.join(", ", others)
+								+ ", so the leakage told between them is 0; a built pair has some",
+						"Add a leakage between the windings, or air paths between their legs."));
+			}
+		}
+	}
+
+	private boolean hasLeakage(int i, int j) {
+		return input.leakages.stream().anyMatch(l -> l.first() == i && l.second() == j || l.first() == j && l.second() == i);
 	}
 
 	List<LeakageResult> leakages() {
@@ -58,7 +82,8 @@ final class Pairs {
 			for (int w : data.windings()) {
 				ids.add(input.windings.get(w).id());
 			}
-			results.add(new ConnectionResult(data.id(), data.series(), ids, data.series() ? series(data) : parallel(data)));
+			results.add(new ConnectionResult(data.id(), data.series(), ids,
+					Arrays.stream(data.senses()).mapToObj(sense -> sense < 0).toList(), data.series() ? series(data) : parallel(data)));
 		}
 		return results;
 	}
@@ -92,6 +117,13 @@ final class Pairs {
 			l[i][n] = 1;
 		}
 		double sum = 0;
+		for (int i = 0; i < n; i++) {
+			for (int j = i + 1; j < n; j++) {
+				if (1 - l[i][j] * l[i][j] / (l[i][i] * l[j][j]) < TOO_TIGHT) {
+					return unequal(data, data.windings()[distinct.get(i)], data.windings()[distinct.get(j)]);
+				}
+			}
+		}
 		double[] currents = solve(l);
 		if (currents == null) {
 			findings.add(new Finding(Severity.WARNING, "parallel-undetermined", data.id(), point,
@@ -103,6 +135,15 @@ final class Pairs {
 			sum += current;
 		}
 		return 1 / sum;
+	}
+
+	/** All flux of one is the other's, but not with the same linkage: the two would short-circuit each other. */
+	private double unequal(StudyInput.ConnectionData data, int first, int second) {
+		findings.add(new Finding(Severity.ERROR, "unequal-parallel-turns", data.id(), point,
+				"'" + input.windings().get(first).id() + "' and '" + input.windings().get(second).id()
+						+ "' share all their flux with different turns or senses: in parallel a current would circulate between them",
+				"Give both the same number of turns and the same sense."));
+		return Double.NaN;
 	}
 
 	private double signed(StudyInput.ConnectionData data, int i, int j) {

@@ -23,11 +23,15 @@ import gapwright.physics.network.Solution;
  */
 public final class Study {
 
+	/** Part of the largest inductance: what is less is rounding. */
+	private static final double NO_INDUCTANCE = 1e-12;
+
 	private final StudyInput input;
 	private final BooleanSupplier cancelled;
 	private final Map<Network, NetworkSolver> solvers = new IdentityHashMap<>();
 	private final Findings findings = new Findings();
 	private Solution warm;
+	private boolean sharedFluxNoted;
 
 	private Study(StudyInput input, BooleanSupplier cancelled) {
 		this.input = input;
@@ -93,10 +97,7 @@ public final class Study {
 			try {
 				end = solve(point, Excitation.mixed(current, linkage));
 			} catch (ImposedLinkagesConflictException e) {
-				findings.add(new Finding(Severity.ERROR, "imposed-linkages-conflict",
-						input.windings.get(e.winding()).id(), point.id(),
-						"its voltage cannot be imposed beside the others': they link the same flux",
-						"Give one of them a current drive, or add a leakage path between them."));
+				findings.add(conflict(point, e.winding(), atMean.differentialInductance()));
 				return notSolved(point, 0, Double.NaN);
 			}
 			if (!end.converged()) {
@@ -112,6 +113,23 @@ public final class Study {
 			}
 		}
 		return result(point, atMean, peak, lowest, highest);
+	}
+
+	private Finding conflict(StudyInput.PointData point, int winding, double[][] inductance) {
+		double largest = 0;
+		for (int w = 0; w < inductance.length; w++) {
+			largest = Math.max(largest, inductance[w][w]);
+		}
+		boolean alone = point.drives().stream().filter(StudyInput.DriveData::imposesLinkage).count() == 1;
+		String id = input.windings.get(winding).id();
+		if (alone || !(inductance[winding][winding] > NO_INDUCTANCE * largest)) {
+			return new Finding(Severity.ERROR, "voltage-without-flux", id, point.id(),
+					"no flux links it, so it takes up no volt-seconds: its coils lie on no closed path or cancel one another",
+					"Close the path of the flux, check the senses of its coils, or give it a current drive.");
+		}
+		return new Finding(Severity.ERROR, "imposed-linkages-conflict", id, point.id(),
+				"its voltage cannot be imposed beside the others': they link the same flux",
+				"Give one of them a current drive, or add a leakage path between them.");
 	}
 
 	private Solution solve(StudyInput.PointData point, Excitation excitation) {
@@ -183,6 +201,10 @@ public final class Study {
 		}
 		List<String> ids = windings.stream().map(WindingResult::id).toList();
 		Pairs pairs = new Pairs(input, point.id(), s, findings);
+		if (!sharedFluxNoted) {
+			sharedFluxNoted = true;
+			pairs.noteSharedFlux();
+		}
 		return new OperatingPointResult(point.id(), true, s.iterations(), s.fluxResidual(), s.energy(), s.coEnergy(),
 				List.copyOf(legs), List.copyOf(gaps), List.copyOf(airPaths), List.copyOf(windings),
 				new InductanceMatrix(ids, inductance), pairs.leakages(), pairs.connections());

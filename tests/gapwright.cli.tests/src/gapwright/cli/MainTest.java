@@ -254,6 +254,9 @@ class MainTest {
 		assertEquals(file + ":: there is no winding 'none'\n", err.replace("\r", ""));
 		assertEquals(64, run("sweep", file, "--to", "60"));
 		assertTrue(err.startsWith("gapwright: sweep: --to '60': a current needs a unit, e.g. 14 A"), err);
+		assertEquals(64, run("sweep", "--csv", file, file));
+		assertEquals(65, run("sweep", file, "--point", "none"));
+		assertEquals(file + ":: there is no operating point 'none'\n", err.replace("\r", ""));
 		assertEquals(64, run("sweep", file, "--steps", "0"));
 		assertEquals(64, run("sweep", file, "--steps"));
 		assertEquals(64, run("sweep", "--to", "1 A"));

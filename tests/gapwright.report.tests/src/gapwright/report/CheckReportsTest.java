@@ -14,9 +14,11 @@ import com.google.gson.JsonParser;
 
 import gapwright.model.check.Severity;
 import gapwright.study.AirPathResult;
+import gapwright.study.ConnectionResult;
 import gapwright.study.Finding;
 import gapwright.study.GapResult;
 import gapwright.study.InductanceMatrix;
+import gapwright.study.LeakageResult;
 import gapwright.study.LegResult;
 import gapwright.study.LegState;
 import gapwright.study.OperatingPointResult;
@@ -114,6 +116,24 @@ class CheckReportsTest {
 		assertTrue(table.contains("    warning leg-near-saturation left at full-load: 86.4 %\n"));
 		assertTrue(table.contains("    note network-islands: two networks. Join them.\n"));
 		assertTrue(table.endsWith("  worst: near\n"));
+	}
+
+	@Test
+	void windingsJoinedAndTheirLeakageStandInTableAndJson() {
+		OperatingPointResult plain = result().operatingPoints().get(0);
+		OperatingPointResult point = new OperatingPointResult(plain.id(), true, 5, 0, NONE, NONE, plain.legs(), plain.gaps(), plain.airPaths(),
+				plain.windings(), new InductanceMatrix(List.of("a", "b"), new double[][] { { 4e-4, 0 }, { 0, 0 } }),
+				List.of(new LeakageResult("between", "a", "b", 3.12e-6, 0.931, 3.5e-6, 0.99)),
+				List.of(new ConnectionResult("both", true, List.of("a", "b"), List.of(false, true), 2e-4)));
+		StudyResult joined = new StudyResult("", List.of(point), List.of(), LegState.WITHIN);
+		String table = CheckTable.of(joined, "f");
+		assertTrue(table.contains("    both: a, b reversed  in series  200.0 µH"), table);
+		assertTrue(line(table, "    between of a to b ").contains("3.120 µH"), table);
+		assertTrue(line(table, "    a, b ").endsWith("–") && !table.contains("NaN"), table);
+		JsonObject json = json(joined).getAsJsonArray("operatingPoints").get(0).getAsJsonObject();
+		assertEquals("[false,true]", first(json, "connections").get("reversed").toString());
+		assertEquals(3.5e-6, first(json, "leakages").get("shortCircuitInductance").getAsDouble());
+		assertEquals("[[1,null],[null,1]]", json.getAsJsonObject("inductance").get("coupling").toString().replace("1.0", "1"));
 	}
 
 	@Test

@@ -56,6 +56,62 @@ class SweepTest {
 		assertEquals(-coarse.nearAt(), sweep(0, -100, 7).leg("wound").nearAt(), 1e-6);
 	}
 
+	/** The limit is passed between two points on both sides of 0 A: what counts is the least current of either sense. */
+	@Test
+	void aLimitPassedOnTheWayFromNoCurrentIsFoundInEitherSense() {
+		double at = sweep(0, 100, 9).leg("wound").overAt();
+		assertEquals(at, sweep(-1.5 * at, 3 * at, 1).leg("wound").overAt(), 1e-6);
+		assertEquals(-at, sweep(-3 * at, 0.9 * at, 1).leg("wound").overAt(), 1e-6);
+		assertEquals(at, sweep(3 * at, -0.5 * at, 2).leg("wound").overAt(), 1e-6);
+		assertEquals(2 * at, sweep(2 * at, 3 * at, 2).leg("wound").overAt(), 0);
+		assertTrue(Double.isNaN(sweep(-0.9 * at, 0.9 * at, 1).leg("wound").overAt()));
+	}
+
+	/** λ/i of one winding means nothing where a magnet or another winding acts too. */
+	@Test
+	void besideAMagnetOrAnotherCurrentThereIsNoApparentInductance() {
+		String end = "</gapwright:Design>";
+		SweepResult magnet = sweep(0, 20, 4, "<gaps id=\"gap\" length=\"1 mm\" fringing=\"WIDENED\"/>",
+				"<magnet id=\"biasing\" length=\"1 mm\" remanence=\"0.4 T\" recoilPermeability=\"1.05\"/>");
+		String other = "<windings id=\"other\"><coils id=\"other-coil\" leg=\"back\" turns=\"5\"/></windings>";
+		String drive = "<drives xsi:type=\"gapwright:CurrentDrive\" id=\"held\" winding=\"other\" current=\"6 A\"/>";
+		SweepResult held = sweep(0, 20, 4, end, other + end, "</operatingPoints>", drive + "</operatingPoints>");
+		for (int i = 0; i <= 4; i++) {
+			assertTrue(Double.isNaN(magnet.apparent()[i]) && Double.isNaN(held.apparent()[i]));
+			assertTrue(magnet.differential()[i] > 0 && held.differential()[i] > 0);
+		}
+		// 6 A in 5 turns are 1.5 A in 20: the same ampere-turns give the same flux
+		SweepResult shifted = sweep(1.5, 21.5, 4);
+		for (int i = 0; i <= 4; i++) {
+			assertEquals(shifted.leg("back").fluxDensity()[i], held.leg("back").fluxDensity()[i], 1e-12);
+		}
+		assertTrue(Math.abs(magnet.leg("wound").fluxDensity()[0]) > 0.1);
+	}
+
+	/** The slope of the linkage between neighbours lies between the differential inductances at both. */
+	@Test
+	void differentialInductanceIsTheSlopeOfTheLinkage() {
+		SweepResult sweep = sweep(-80, 80, 64);
+		for (int i = 1; i <= 64; i++) {
+			double slope = (sweep.linkage()[i] - sweep.linkage()[i - 1]) / (sweep.current()[i] - sweep.current()[i - 1]);
+			double least = Math.min(sweep.differential()[i], sweep.differential()[i - 1]);
+			double most = Math.max(sweep.differential()[i], sweep.differential()[i - 1]);
+			assertTrue(least - 1e-12 <= slope && slope <= most + 1e-12, sweep.current()[i] + " A");
+		}
+	}
+
+	@Test
+	void theLargestCurrentIncludesWhatAVoltageDrives() {
+		StudyInput current = Lowering.of(Designs.ring());
+		assertEquals(12, BiasSweep.largestCurrent(current, "main"), 0);
+		StudyInput voltage = Lowering.of(Designs.ring("xsi:type=\"gapwright:CurrentDrive\"", "xsi:type=\"gapwright:VoltageDrive\"",
+				"current=\"10 A\" ripple=\"4 A\"", "voltage=\"30 V\" onTime=\"10 µs\" bias=\"0 A\""));
+		double swing = BiasSweep.largestCurrent(voltage, "main");
+		double linkage = BiasSweep.run(voltage, new SweepRequest("full", "main", 0, swing, 1), Progress.NONE).linkage()[1];
+		assertEquals(30 * 10e-6 / 2, linkage, 1e-9 * linkage);
+		assertEquals(0, BiasSweep.largestCurrent(current, "none"), 0);
+	}
+
 	@Test
 	void whatIsNotThereIsRefusedAndCancellingEndsIt() {
 		StudyInput input = Lowering.of(Designs.ring());

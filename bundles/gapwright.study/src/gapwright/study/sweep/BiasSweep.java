@@ -8,13 +8,16 @@ import java.util.concurrent.CancellationException;
 import gapwright.physics.network.Excitation;
 import gapwright.physics.network.NetworkSolver;
 import gapwright.physics.network.Solution;
+import gapwright.study.OperatingPointResult;
 import gapwright.study.Progress;
+import gapwright.study.Study;
 import gapwright.study.StudyInput;
+import gapwright.study.WindingResult;
 
 /** Varies the current of one winding at an operating point; each point starts from the one before. */
 public final class BiasSweep {
 
-	/** Part of the range to which the current is found where a leg comes near saturation. */
+	/** Part of the current, and of the limit, to which it is found where a leg reaches a limit. */
 	private static final double FOUND_WITHIN = 1e-9;
 
 	private final StudyInput input;
@@ -53,6 +56,24 @@ public final class BiasSweep {
 	 */
 	public static SweepResult run(StudyInput input, SweepRequest request, Progress progress) {
 		return new BiasSweep(input, request, progress).run();
+	}
+
+	/**
+	 * @return largest magnitude of a winding's current at any operating point, A, ripple and what voltages drive included; 0
+	 *         when it carries none anywhere
+	 */
+	public static double largestCurrent(StudyInput input, String winding) {
+		double largest = input.largestCurrent(winding);
+		int w = input.winding(winding);
+		if (w >= 0 && input.points().stream().anyMatch(p -> p.drives() != null && p.drives().get(w).imposesLinkage())) {
+			for (OperatingPointResult point : Study.run(input).operatingPoints()) {
+				WindingResult there = point.winding(winding);
+				if (there != null) {
+					largest = Math.max(largest, Math.max(Math.abs(there.lowestCurrent()), Math.abs(there.highestCurrent())));
+				}
+			}
+		}
+		return largest;
 	}
 
 	private SweepResult run() {
@@ -100,31 +121,67 @@ public final class BiasSweep {
 		return solution;
 	}
 
-	/** Scans outwards from the least current of both senses, then halves between the points where the limit is passed. */
+	/** Scans outwards from the least current, in both senses, then narrows down between the points where the limit is passed. */
 	private double reaches(int leg, double[] current, double[] density, double limit) {
-		Integer[] outwards = new Integer[current.length];
-		Arrays.setAll(outwards, i -> i);
-		Arrays.sort(outwards, (i, j) -> Double.compare(Math.abs(current[i]), Math.abs(current[j])));
-		for (int i : outwards) {
-			if (Math.abs(density[i]) >= limit) {
-				int inwards = i > 0 && Math.abs(current[i - 1]) < Math.abs(current[i]) ? i - 1 : i + 1;
-				boolean isBelow = inwards < current.length && Math.abs(current[inwards]) < Math.abs(current[i])
-						&& Math.abs(density[inwards]) < limit;
-				return isBelow ? between(leg, current[inwards], current[i], limit) : current[i];
+		boolean rises = request.to() > request.from();
+		double least = Math.max(Math.min(request.from(), request.to()), Math.min(Math.max(request.from(), request.to()), 0));
+		double atLeast = Double.NaN;
+		for (int i = 0; i < current.length; i++) {
+			atLeast = current[i] == least ? density[i] : atLeast;
+		}
+		if (Double.isNaN(atLeast) && Arrays.stream(density).anyMatch(b -> Math.abs(b) >= limit)) {
+			atLeast = solve(least).legFluxDensity()[leg];
+		}
+		if (Math.abs(atLeast) >= limit) {
+			return least;
+		}
+		double found = Double.NaN;
+		for (int sense = -1; sense <= 1; sense += 2) {
+			double at = least;
+			double there = atLeast;
+			for (int n = 0; n < current.length; n++) {
+				int i = rises == sense > 0 ? n : current.length - 1 - n;
+				if (sense * (current[i] - least) <= 0) {
+					continue;
+				}
+				if (Math.abs(density[i]) >= limit) {
+					double passed = between(leg, at, Math.abs(there) - limit, current[i], Math.abs(density[i]) - limit, limit);
+					found = Double.isNaN(found) || Math.abs(passed) < Math.abs(found) ? passed : found;
+					break;
+				}
+				at = current[i];
+				there = density[i];
 			}
 		}
-		return Double.NaN;
+		return found;
 	}
 
-	private double between(int leg, double below, double above, double limit) {
+	/** False position; the end that stays counts half each time (Illinois rule), so that neither stays for long. */
+	private double between(int leg, double below, double lacking, double above, double beyond, double limit) {
 		double low = below;
 		double high = above;
-		while (Math.abs(high - low) > FOUND_WITHIN * Math.abs(request.to() - request.from())) {
-			double middle = (low + high) / 2;
-			if (Math.abs(solve(middle).legFluxDensity()[leg]) >= limit) {
+		double atLow = lacking;
+		double atHigh = beyond;
+		double least = FOUND_WITHIN * Math.max(Math.abs(above - below), Math.max(Math.abs(above), Math.abs(below)));
+		int stays = 0;
+		while (Math.abs(high - low) > least) {
+			double middle = (low * atHigh - high * atLow) / (atHigh - atLow);
+			boolean isInside = Math.min(low, high) < middle && middle < Math.max(low, high);
+			middle = isInside ? middle : (low + high) / 2;
+			double value = Math.abs(solve(middle).legFluxDensity()[leg]) - limit;
+			if (Double.isNaN(value) || Math.abs(value) <= FOUND_WITHIN * limit) {
+				return Double.isNaN(value) ? Double.NaN : middle;
+			}
+			if (value > 0) {
 				high = middle;
+				atHigh = value;
+				atLow = stays > 0 ? atLow / 2 : atLow;
+				stays = 1;
 			} else {
 				low = middle;
+				atLow = value;
+				atHigh = stays < 0 ? atHigh / 2 : atHigh;
+				stays = -1;
 			}
 		}
 		return high;

@@ -194,7 +194,7 @@ public final class BiasSweepView extends ComputingView<SweepResult> {
 			throw new IllegalArgumentException("The design has no winding to sweep.");
 		}
 		double begin = current(wantedFrom, 0);
-		double end = current(wantedTo, BEYOND * input.largestCurrent(wantedWinding));
+		double end = current(wantedTo, BEYOND * BiasSweep.largestCurrent(input, wantedWinding));
 		if (begin == end) {
 			throw new IllegalArgumentException("Nothing to sweep: this winding carries no current. Type where the sweep ends.");
 		}
