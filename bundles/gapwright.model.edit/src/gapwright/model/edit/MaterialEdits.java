@@ -11,6 +11,7 @@ import gapwright.model.Design;
 import gapwright.model.GapwrightFactory;
 import gapwright.model.Ids;
 import gapwright.model.InitialPermeability;
+import gapwright.model.KneeCurve;
 import gapwright.model.LinearCurve;
 import gapwright.model.Material;
 import gapwright.model.Saturation;
@@ -61,6 +62,11 @@ public final class MaterialEdits {
 	/** As above, of a further curve. */
 	public static Edit changeCurve(CurveAtTemperature place, Curve curve) {
 		return new Edit("Change curve", place, () -> place.setCurve(curve));
+	}
+
+	/** Gives a Knee curve the saturation polarisation that somebody has worked out. */
+	public static Edit polarisation(KneeCurve curve, Quantity polarisation) {
+		return new Edit("Fit to a sheet's point", curve, () -> curve.setSaturationPolarisation(polarisation));
 	}
 
 	/** Adds a curve 75 K above the hottest, a copy of the first one, to be typed over. */

@@ -27,10 +27,12 @@ import org.eclipse.swt.widgets.Label;
 
 import gapwright.model.Curve;
 import gapwright.model.CurveAtTemperature;
+import gapwright.model.KneeCurve;
 import gapwright.model.Material;
 import gapwright.model.TableCurve;
 import gapwright.model.edit.DesignEdits;
 import gapwright.model.edit.MaterialEdits;
+import gapwright.model.edit.history.Edit;
 import gapwright.ui.fields.Accessibles;
 import gapwright.ui.fields.ElementRows;
 import gapwright.ui.fields.FeatureForm;
@@ -46,6 +48,7 @@ final class CurvePart {
 	private final Combo kind;
 	private final Label law;
 	private final FeatureForm parameters;
+	private final Button sheetPoint;
 	private final Composite table;
 	private final ElementRows points;
 	private Material material;
@@ -95,6 +98,11 @@ final class CurvePart {
 		parameters = new FeatureForm(form, page.runner()).add(LINEAR_CURVE__RELATIVE_PERMEABILITY, KNEE_CURVE__INITIAL_PERMEABILITY,
 				KNEE_CURVE__SATURATION_POLARISATION, ARCTAN_CURVE__INITIAL_PERMEABILITY, ARCTAN_CURVE__SATURATION_POLARISATION,
 				ROLL_OFF_CURVE__INITIAL_PERMEABILITY, ROLL_OFF_CURVE__HALF_FIELD_STRENGTH, ROLL_OFF_CURVE__EXPONENT);
+		sheetPoint = new Button(fields, SWT.PUSH);
+		sheetPoint.setText("Through a sheet's point…");
+		sheetPoint.setToolTipText("Find the saturation polarisation that leads the curve through the data sheet's B at a field strength");
+		sheetPoint.setLayoutData(new GridData(SWT.BEGINNING, SWT.TOP, false, false));
+		sheetPoint.addListener(SWT.Selection, event -> throughSheetPoint());
 		table = new Composite(fields, SWT.NONE);
 		table.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
 		table.setLayout(FormLayouts.grid(1));
@@ -109,6 +117,13 @@ final class CurvePart {
 
 	private Curve curve() {
 		return other == null ? material.getCurve() : other.getCurve();
+	}
+
+	private void throughSheetPoint() {
+		Edit edit = SheetPoint.ask(sheetPoint.getShell(), (KneeCurve) curve());
+		if (edit != null) {
+			page.run(edit);
+		}
 	}
 
 	private void chooseCurve(int index) {
@@ -148,6 +163,7 @@ final class CurvePart {
 		law.setText(current == null ? "This material has no curve yet: choose a kind." : current.law());
 		parameters.bind(curve instanceof TableCurve ? null : curve);
 		FormLayouts.show(parameters.control(), curve != null && !(curve instanceof TableCurve));
+		FormLayouts.show(sheetPoint, curve instanceof KneeCurve);
 		FormLayouts.show(table, curve instanceof TableCurve);
 		points.show(curve instanceof TableCurve tabled ? tabled.getPoints() : List.of());
 		FormLayouts.relayout(table);

@@ -97,11 +97,7 @@ public final class WhereFromSection extends ElementSection {
 			bold("Inputs used");
 			new Label(area, SWT.NONE);
 			for (Input input : inputs) {
-				Label name = new Label(area, SWT.WRAP);
-				name.setText(input.name());
-				name.setLayoutData(new GridData(SWT.BEGINNING, SWT.TOP, false, false));
-				Label value = Headings.note(area, input.value(), 1);
-				((GridData) value.getLayoutData()).widthHint = NARROW;
+				note(input.name() + ": " + input.value(), INDENT);
 			}
 		}
 		FormLayouts.relayout(area);

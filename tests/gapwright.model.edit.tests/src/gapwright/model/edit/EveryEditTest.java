@@ -30,6 +30,7 @@ import gapwright.model.Design;
 import gapwright.model.GapwrightFactory;
 import gapwright.model.GapwrightPackage.Literals;
 import gapwright.model.Joint;
+import gapwright.model.KneeCurve;
 import gapwright.model.Leg;
 import gapwright.model.Material;
 import gapwright.model.OperatingPoint;
@@ -76,6 +77,8 @@ class EveryEditTest {
 		EDITS.put("WindingEdits.addCoil", d -> WindingEdits.addCoil(Sample.get(d, "sense"), leg(d, "left"), 3));
 		EDITS.put("MaterialEdits.add", MaterialEdits::add);
 		EDITS.put("MaterialEdits.addCopy", d -> MaterialEdits.addCopy(d, Sample.design().getMaterials().get(1)));
+		EDITS.put("MaterialEdits.polarisation", d -> MaterialEdits.polarisation((KneeCurve) material(d).getCurve(),
+				Quantity.parse("0.6 T", Dimension.FLUX_DENSITY)));
 		EDITS.put("MaterialEdits.changeCurve",
 				d -> MaterialEdits.changeCurve(material(d), GapwrightFactory.eINSTANCE.createTableCurve()));
 		EDITS.put("MaterialEdits.addCurve", d -> MaterialEdits.addCurve(material(d)));
