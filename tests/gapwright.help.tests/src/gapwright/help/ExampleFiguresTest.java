@@ -13,6 +13,7 @@ import org.junit.jupiter.api.Test;
 import gapwright.library.Example;
 import gapwright.library.Examples;
 import gapwright.model.DesignReader;
+import gapwright.study.LeakageResult;
 import gapwright.study.OperatingPointResult;
 import gapwright.study.Study;
 
@@ -52,6 +53,13 @@ class ExampleFiguresTest {
 	void coupledChoke() throws IOException {
 		double coupling = point("coupled-choke", "balanced").inductance().coupling("phase-one", "phase-two");
 		says(WALK, String.format(Locale.ROOT, "−%.2f", -coupling));
+	}
+
+	@Test
+	void flybackTransformer() throws IOException {
+		LeakageResult leakage = point("flyback-transformer", "storing").leakages().get(0);
+		says(WALK, String.format(Locale.ROOT, "%.1f µH of it, seen from the primary", leakage.inductance() * 1e6));
+		says(WALK, String.format(Locale.ROOT, "a coupling of %.3f while the primary conducts", leakage.coupling()));
 	}
 
 	@Test

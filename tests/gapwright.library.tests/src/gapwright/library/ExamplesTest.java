@@ -156,6 +156,14 @@ class ExamplesTest {
 		assertEquals(stored, point(result, "releasing").energy(), 1e-9 * stored);
 	}
 
+	/** Coupling of 0.98 to 0.999 and a leakage of 0.5 to 3 % are usual; without interleaving up to 5 % (common practice). */
+	@Test
+	void flybackTransformerHasAUsualLeakage() throws IOException {
+		OperatingPointResult storing = point(Study.of(read("flyback-transformer.gapwright")), "storing");
+		double share = storing.leakages().get(0).inductance() / storing.inductance().of("primary");
+		assertTrue(share > 0.005 && share < 0.05, "leakage " + share);
+	}
+
 	@Test
 	void onlyTheStalledPumpDrivesTheReactorOverSaturationAndOnlyItsMiddleLeg() throws IOException {
 		StudyResult result = Study.of(read("three-phase-reactor.gapwright"));
