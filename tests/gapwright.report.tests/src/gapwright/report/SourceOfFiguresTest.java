@@ -39,7 +39,7 @@ class SourceOfFiguresTest {
 				List.of(new LegResult("l", 1, 1, 1, 1, 1, 1, 1, LegState.NEAR)), List.of(new GapResult("g", "l", 1, 1, 1)),
 				List.of(new AirPathResult("a", 1)), List.of(new WindingResult("w", 1, 1, 1, 1, 1, 1), new WindingResult("v", 1, 1, 1, 1, 1, 1)),
 				new InductanceMatrix(List.of("w", "v"), new double[][] { { 2, 1 }, { 1, 2 } }),
-				List.of(new LeakageResult("k", "w", "v", 1, 1, 1, 0.5)), List.of(new ConnectionResult("c", true, List.of("w", "v"), 1)));
+				List.of(new LeakageResult("k", "w", "v", 1, 1, 1, 0.5)), List.of(new ConnectionResult("c", true, List.of("w", "v"), List.of(false, false), 1)));
 		return JsonParser.parseString(CheckJson.of(new StudyResult("d", List.of(point), List.of(), LegState.NEAR), "f", "0")).getAsJsonObject();
 	}
 
