@@ -12,10 +12,17 @@ import org.junit.jupiter.api.Test;
 
 import gapwright.library.Example;
 import gapwright.library.Examples;
+import gapwright.model.Design;
 import gapwright.model.DesignReader;
 import gapwright.study.LeakageResult;
+import gapwright.study.Lowering;
 import gapwright.study.OperatingPointResult;
+import gapwright.study.Progress;
 import gapwright.study.Study;
+import gapwright.study.tolerance.Band;
+import gapwright.study.tolerance.ToleranceRequest;
+import gapwright.study.tolerance.ToleranceResult;
+import gapwright.study.tolerance.ToleranceStudy;
 
 /** The figures the guide tells of the examples are those they have. */
 class ExampleFiguresTest {
@@ -30,6 +37,13 @@ class ExampleFiguresTest {
 		says("first-steps.html", perCent(hot, "centre-leg"));
 		says(WALK, perCent(point("boost-choke", "morning"), "centre-leg"));
 		says("command-line.html", String.format(Locale.ROOT, "%.4f T", hot.leg("centre-leg").peakFluxDensity()));
+	}
+
+	@Test
+	void tolerancesOfTheBoostChoke() throws IOException {
+		ToleranceResult result = ToleranceStudy.run(Lowering.of(design("boost-choke")), new ToleranceRequest(0, 1), Progress.NONE);
+		Band worst = result.point("full-load").band(Band.Kind.UTILISATION, "centre-leg");
+		says(WALK, "reaches " + Math.round(worst.cornerHigh() * 100) + " %");
 	}
 
 	@Test
@@ -70,10 +84,14 @@ class ExampleFiguresTest {
 	}
 
 	private static OperatingPointResult point(String example, String id) throws IOException {
+		return Study.of(design(example)).operatingPoint(id);
+	}
+
+	private static Design design(String example) throws IOException {
 		String name = example + ".gapwright";
 		Example file = Examples.all().stream().filter(e -> e.fileName().equals(name)).findFirst().orElseThrow();
 		try (InputStream input = file.open()) {
-			return Study.of(DesignReader.read(input, name)).operatingPoint(id);
+			return DesignReader.read(input, name);
 		}
 	}
 
