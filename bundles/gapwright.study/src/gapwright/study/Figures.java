@@ -1,12 +1,11 @@
 package gapwright.study;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
+import gapwright.model.quantity.Significant;
 
 /** Numbers as they stand in messages. */
 final class Figures {
 
-	private static final MathContext THREE = new MathContext(3);
+	private static final int DIGITS = 3;
 
 	private Figures() {
 	}
@@ -16,8 +15,7 @@ final class Figures {
 		if (!Double.isFinite(value)) {
 			return "?";
 		}
-		BigDecimal rounded = new BigDecimal(value).round(THREE);
-		return (rounded.signum() == 0 ? BigDecimal.ZERO : rounded.stripTrailingZeros()).toPlainString();
+		return Significant.of(value, DIGITS).stripTrailingZeros().toPlainString();
 	}
 
 	/** @return "92 %" */

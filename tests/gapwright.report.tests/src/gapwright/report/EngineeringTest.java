@@ -39,7 +39,8 @@ class EngineeringTest {
 
 	@Test
 	void beyondTheLastPrefixTheFigureGrowsInstead() {
-		assertEquals("1234567 GA", Engineering.of(1.234567e15, "A", 7));
+		assertEquals("1.235 TA", Engineering.of(1.2346e12, "A", 4));
+		assertEquals("1234567 TA", Engineering.of(1.234567e18, "A", 7));
 		assertEquals("0.001230 fA", Engineering.of(1.23e-18, "A", 4));
 	}
 

@@ -1,8 +1,9 @@
 package gapwright.ui.fields;
 
 import java.math.BigDecimal;
-import java.math.MathContext;
 import java.math.RoundingMode;
+
+import gapwright.model.quantity.Significant;
 
 /**
  * Figures as people read them: three significant digits and a prefix of engineering practice (common practice: exponents that are multiples of three).
@@ -14,8 +15,6 @@ public final class FigureFormat {
 	public static final String NONE = "–";
 
 	private static final int DIGITS = 3;
-	private static final String[] PREFIXES = { "f", "p", "n", "µ", "m", "", "k", "M", "G", "T" };
-	private static final int UNITY = 5;
 	private static final char MINUS = '−';
 
 	private FigureFormat() {
@@ -34,8 +33,8 @@ public final class FigureFormat {
 		if (value == 0 || Double.isInfinite(value)) {
 			return plain(value) + ' ' + unit;
 		}
-		int prefix = prefix(rounded(value));
-		return plain(value * Math.pow(1000, UNITY - prefix)) + ' ' + PREFIXES[prefix] + unit;
+		Significant.Prefixed scaled = Significant.prefixed(value, DIGITS);
+		return plain(scaled.figure()) + ' ' + scaled.prefix() + unit;
 	}
 
 	/**
@@ -80,24 +79,15 @@ public final class FigureFormat {
 		if (value == 0) {
 			return "0";
 		}
-		BigDecimal figure = rounded(value);
-		int exponent = figure.precision() - figure.scale() - 1;
+		return plain(Significant.of(value, DIGITS));
+	}
+
+	private static String plain(BigDecimal figure) {
+		int exponent = Significant.exponent(figure);
 		if (exponent < -3 || exponent >= 6) {
 			return signed(figure.movePointLeft(exponent).toPlainString()) + "·10" + superscript(exponent);
 		}
-		return signed(figure.scale() < 0 ? figure.setScale(0).toPlainString() : figure.toPlainString());
-	}
-
-	private static BigDecimal rounded(double value) {
-		BigDecimal figure = new BigDecimal(value).round(new MathContext(DIGITS, RoundingMode.HALF_EVEN));
-		int missing = DIGITS - figure.precision();
-		return missing > 0 ? figure.setScale(figure.scale() + missing) : figure;
-	}
-
-	/** Chosen after rounding: 999.7 µH is 1.00 mH, not 1000 µH. */
-	private static int prefix(BigDecimal figure) {
-		int exponent = figure.precision() - figure.scale() - 1;
-		return Math.min(PREFIXES.length - 1, Math.max(0, UNITY + Math.floorDiv(exponent, 3)));
+		return signed(figure.toPlainString());
 	}
 
 	private static String signed(String figure) {
