@@ -26,10 +26,15 @@ final class DesignOutline extends ContentOutlinePage {
 	private final DesignSession session;
 	private final CanvasModel canvas;
 	private final ScrollingGraphicalViewer viewer;
-	private final Runnable historyListener = this::refresh;
+	/** A drag makes a step for each move of the mouse; the tree, which shows no figures, is read anew once they cease, ms. */
+	private static final int REST = 150;
+
+	private final Runnable historyListener = this::refreshLater;
+	private final Runnable refresher = this::refreshNow;
 	private final SelectionHub.Listener hubListener = this::reveal;
 	private SashForm sash;
 	private boolean following;
+	private boolean outdated;
 
 	DesignOutline(CanvasModel canvas, ScrollingGraphicalViewer viewer) {
 		this.canvas = canvas;
@@ -69,14 +74,24 @@ final class DesignOutline extends ContentOutlinePage {
 		return name.isEmpty() ? kind : kind + "  " + name;
 	}
 
-	private void refresh() {
+	private void refreshLater() {
 		if (getControl() != null && !getControl().isDisposed()) {
+			outdated = true;
+			getControl().getDisplay().timerExec(REST, refresher);
+		}
+	}
+
+	private void refreshNow() {
+		if (outdated && getControl() != null && !getControl().isDisposed()) {
+			outdated = false;
 			getTreeViewer().refresh();
 		}
 	}
 
 	private void reveal(List<EObject> elements, Object source) {
 		if (source != this && getControl() != null && !getControl().isDisposed()) {
+			// what is to be shown may have come with a step not shown yet
+			refreshNow();
 			following = true;
 			try {
 				getTreeViewer().setSelection(new StructuredSelection(elements), true);

@@ -31,12 +31,18 @@ final class LedgerTable<R> {
 	/** Rows on the screen at once: filling more would hold up the window. What is copied is never cut short. */
 	static final int MOST = 2000;
 
+	/** How long no step may have come before rows out of sight are filled, ms. */
+	private static final int REST = 50;
+
 	private final Table table;
 	private final List<LedgerColumn<R>> columns;
 	private final LedgerOrder<R> order = new LedgerOrder<>();
 	private final IDialogSettings settings;
 	private List<R> design = List.of();
 	private List<R> rows = List.of();
+	// one object, so that a new step puts the timer off
+	private final Runnable filler = this::fillOutOfSight;
+	private boolean outOfSight;
 	private Consumer<List<R>> onSelect = selected -> { };
 
 	LedgerTable(Composite parent, List<LedgerColumn<R>> columns, IDialogSettings settings) {
@@ -49,6 +55,8 @@ final class LedgerTable<R> {
 		}
 		table.addListener(SWT.Selection, event -> onSelect.accept(selection()));
 		table.addListener(SWT.KeyDown, this::key);
+		table.addListener(SWT.Resize, event -> fillOutOfSight());
+		table.getVerticalBar().addListener(SWT.Selection, event -> fillOutOfSight());
 	}
 
 	private void create(LedgerColumn<R> column) {
@@ -100,12 +108,30 @@ final class LedgerTable<R> {
 		if (table.getItemCount() > shown) {
 			table.remove(shown, table.getItemCount() - 1);
 		}
+		int top = table.getTopIndex();
+		int bottom = top + table.getClientArea().height / Math.max(1, table.getItemHeight()) + 1;
 		for (int index = 0; index < shown; index++) {
-			fill(index < table.getItemCount() ? table.getItem(index) : new TableItem(table, SWT.NONE), rows.get(index));
+			boolean isNew = index >= table.getItemCount();
+			TableItem item = isNew ? new TableItem(table, SWT.NONE) : table.getItem(index);
+			if (isNew || index >= top && index <= bottom) {
+				fill(item, rows.get(index));
+			}
 		}
+		outOfSight = true;
+		table.getDisplay().timerExec(REST, filler);
 		table.setRedraw(true);
 		table.redraw();
 		select(selected);
+	}
+
+	/** Rows that nobody sees need not follow every step of a drag; they do before they come into sight. */
+	private void fillOutOfSight() {
+		if (outOfSight && !table.isDisposed()) {
+			outOfSight = false;
+			for (int index = 0; index < Math.min(table.getItemCount(), rows.size()); index++) {
+				fill(table.getItem(index), rows.get(index));
+			}
+		}
 	}
 
 	/** The texts last shown are kept beside the item: asking the widget costs more than reckoning the leg did. */
