@@ -25,6 +25,7 @@ public final class PlotPainter {
 	private final double y;
 	private final double width;
 	private final double height;
+	private final double right;
 
 	private PlotPainter(Plot plot, Pen pen, double totalWidth, double totalHeight) {
 		this.plot = plot;
@@ -37,6 +38,7 @@ public final class PlotPainter {
 		y = TOP;
 		width = totalWidth - LEFT - names;
 		height = totalHeight - TOP - BOTTOM;
+		right = totalWidth - 8;
 	}
 
 	/** @param cursor x to read the lines at; NaN for none */
@@ -74,12 +76,13 @@ public final class PlotPainter {
 		plot.bars().forEach(this::bar);
 		pen.outline(new double[] { x, y, x + width, y, x + width, y + height, x, y + height }, Tone.NOTE, 1);
 		pen.text(plot.x().heading(), x + width, y + height + 2 * LINE_HEIGHT + 2, Align.END, TEXT, false, Tone.NOTE);
-		pen.text(plot.y().heading(), 6, y - 10, Align.START, TEXT, true, Tone.INK);
+		boolean reading = !Double.isNaN(cursor) && plot.x().share(cursor) >= 0 && plot.x().share(cursor) <= 1;
+		pen.text(plot.y().heading() + (reading ? " at " + figure(plot.x(), cursor) : ""), 6, y - 10, Align.START, TEXT, true, Tone.INK);
 		plot.levels().forEach(this::level);
 		plot.lines().forEach(this::line);
 		plot.spots().forEach(this::spot);
-		names();
-		if (!Double.isNaN(cursor) && plot.x().share(cursor) >= 0 && plot.x().share(cursor) <= 1) {
+		names(reading ? cursor : Double.NaN);
+		if (reading) {
 			readOut(cursor);
 		} else {
 			spotNames();
@@ -147,7 +150,7 @@ public final class PlotPainter {
 
 	/** In the line of the heading, where they hide nothing; the read-out takes their place. */
 	private void spotNames() {
-		double at = x + width;
+		double at = right;
 		for (int i = plot.spots().size() - 1; i >= 0; i--) {
 			Plot.Spot spot = plot.spots().get(i);
 			pen.text(spot.name(), at, y - 10, Align.END, TEXT, false, spot.tone());
@@ -155,8 +158,8 @@ public final class PlotPainter {
 		}
 	}
 
-	/** Names stand at the lines' ends, pushed apart where lines end close to one another. */
-	private void names() {
+	/** Names, or values at the cursor, stand at the lines' ends, pushed apart where lines end close to one another. */
+	private void names(double cursor) {
 		record End(Plot.Line line, double y) {
 		}
 		List<End> ends = new ArrayList<>();
@@ -170,23 +173,20 @@ public final class PlotPainter {
 		double last = Double.NEGATIVE_INFINITY;
 		for (End end : ends) {
 			last = Math.max(end.y(), last + LINE_HEIGHT);
-			pen.text(end.line().name(), x + width + 6, last + 4, Align.START, TEXT, false, end.line().tone());
+			String text = Double.isNaN(cursor) ? end.line().name() : figure(plot.y(), end.line().at(cursor));
+			pen.text(text, x + width + 6, last + 4, Align.START, TEXT, false, end.line().tone());
 		}
 	}
 
+	/** A line at the cursor, its value in the heading, those of the lines in place of their names. */
 	private void readOut(double cursor) {
 		pen.line(new double[] { px(cursor), y, px(cursor), y + height }, Tone.SELECTION, 1, false);
-		StringBuilder text = new StringBuilder(figure(plot.x(), cursor));
 		for (Plot.Line line : plot.lines()) {
 			double value = line.at(cursor);
-			if (!Double.isNaN(value)) {
-				text.append("   ").append(line.name()).append(' ').append(figure(plot.y(), value));
-				if (plot.y().share(value) >= 0 && plot.y().share(value) <= 1) {
-					pen.disc(px(cursor), py(value), 3, line.tone(), line.tone(), 1);
-				}
+			if (!Double.isNaN(value) && plot.y().share(value) >= 0 && plot.y().share(value) <= 1) {
+				pen.disc(px(cursor), py(value), 3, line.tone(), line.tone(), 1);
 			}
 		}
-		pen.text(text.toString(), x + width, y - 10, Align.END, TEXT, false, Tone.INK);
 	}
 
 	private static String figure(Axis axis, double value) {
