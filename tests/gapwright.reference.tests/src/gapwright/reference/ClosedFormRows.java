@@ -56,6 +56,10 @@ final class ClosedFormRows {
 			parameters(rows, "sections of " + row.get("name").getAsString(), "IEC 60205, from memory; sums in a numerical library",
 					EffectiveParameters.of(parts), row);
 		}
+		double area = 1e-4;
+		double diameter = Math.sqrt(4 * area / Math.PI);
+		rows.add(Row.of("solenoid of 300 turns, 1 cm², 0.5 m, in the long limit", "elementary, µ₀N²A/l", "inductance, H",
+				Solenoid.currentSheet(300, diameter, 0.5) / Solenoid.nagaoka(diameter / 0.5), 2.2619467105846513e-05, EXACT));
 		for (JsonObject row : read("wire-awg")) {
 			int gauge = (int) number(row, "awg");
 			rows.add(Row.of("AWG " + gauge, "ASTM B258 defining formula, from memory", "bare diameter, m",

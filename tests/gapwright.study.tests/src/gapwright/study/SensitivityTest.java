@@ -147,6 +147,26 @@ class SensitivityTest {
 		}
 	}
 
+	/** A ring of 400 legs in series: the 50 with the highest utilisation are followed, and their derivatives are the same. */
+	@Test
+	void ofALargeDesignTheFullestLegsAreFollowed() {
+		StringBuilder legs = new StringBuilder();
+		for (int i = 0; i < 399; i++) {
+			legs.append("<joints id=\"j").append(i).append("\" x=\"").append(i).append(" mm\" y=\"90 mm\"/>");
+		}
+		for (int i = 0; i < 400; i++) {
+			legs.append("<legs id=\"l").append(i).append("\" from=\"").append(i == 0 ? "a" : "j" + (i - 1)).append("\" to=\"")
+					.append(i == 399 ? "b" : "j" + i).append("\" material=\"ferrite\" width=\"").append(12 + 0.01 * i)
+					.append(" mm\" depth=\"15 mm\" pathLength=\"1 mm\"/>");
+		}
+		String back = "<legs id=\"back\" from=\"b\" to=\"a\" material=\"ferrite\" width=\"12 mm\" depth=\"15 mm\" pathLength=\"90 mm\"/>";
+		StudyInput input = Lowering.of(Designs.ring(back, legs.toString()));
+		SensitivityResult result = SensitivityStudy.of(input, "full", Progress.NONE);
+		assertEquals(1 + 50, result.figures().size());
+		assertTrue(result.figures().stream().noneMatch(f -> f.subject().equals("l399")));
+		assertTrue(result.figures().stream().anyMatch(f -> f.subject().equals("l0")));
+	}
+
 	@Test
 	void aPointThatCannotBeComputedHasNoSensitivities() {
 		StudyInput input = Lowering.of(Designs.ring("length=\"1 mm\"", "length=\"14 mm\""));

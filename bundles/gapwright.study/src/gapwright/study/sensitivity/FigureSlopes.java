@@ -26,17 +26,22 @@ public final class FigureSlopes {
 	private final DesignNumbers numbers;
 	private final Network network;
 	private final PointSolver.State state;
+	private final int[] legs;
 	private final Map<Solution, Sensitivities> sensitivities = new IdentityHashMap<>();
 	private final List<Integer> imposed = new ArrayList<>();
 
-	/** @param network of the numbers, at the point's temperature */
+	/**
+	 * @param network of the numbers, at the point's temperature
+	 * @param legs    whose utilisation is asked for
+	 */
 	public FigureSlopes(StudyInput input, StudyInput.PointData point, DesignNumbers numbers, Network network,
-			PointSolver.State state) {
+			PointSolver.State state, int[] legs) {
 		this.input = input;
 		this.point = point;
 		this.numbers = numbers;
 		this.network = network;
 		this.state = state;
+		this.legs = legs;
 		for (int w = 0; w < input.windings().size(); w++) {
 			if (point.drives().get(w).imposesLinkage()) {
 				imposed.add(w);
@@ -60,10 +65,8 @@ public final class FigureSlopes {
 			}
 		}
 		Map<Solution, double[]> answers = new IdentityHashMap<>();
-		for (int k = 0; k < input.legs().size(); k++) {
-			if (!Double.isNaN(state.utilisation(k))) {
-				slopes.add(utilisation(k, knob, effects, answers));
-			}
+		for (int k : legs) {
+			slopes.add(utilisation(k, knob, effects, answers));
 		}
 		return slopes.stream().mapToDouble(Double::doubleValue).toArray();
 	}

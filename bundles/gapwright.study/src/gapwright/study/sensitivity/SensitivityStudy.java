@@ -10,11 +10,15 @@ import gapwright.study.sensitivity.SensitivityResult.Figure;
 import gapwright.study.sensitivity.SensitivityResult.Kind;
 import gapwright.study.sensitivity.SensitivityResult.Value;
 import gapwright.study.vary.DesignNumbers;
+import gapwright.study.vary.JudgedLegs;
 import gapwright.study.vary.Knob;
 import gapwright.study.vary.Knobs;
 import gapwright.study.vary.PointSolver;
 
-/** How every inductance and every leg's utilisation depends on every number of the design; exact, by the adjoint method. */
+/**
+ * How every inductance and every leg's utilisation depends on every number of the design; exact, by the adjoint method. Of a
+ * large design only the fullest legs, see {@link JudgedLegs}.
+ */
 public final class SensitivityStudy {
 
 	private SensitivityStudy() {
@@ -35,9 +39,10 @@ public final class SensitivityStudy {
 		if (state == null) {
 			throw new IllegalArgumentException("the operating point '" + operatingPoint + "' has no solution, see the findings");
 		}
-		List<Figure> figures = figures(input, state);
+		int[] legs = JudgedLegs.of(state);
+		List<Figure> figures = figures(input, state, legs);
 		List<Knob> knobs = Knobs.of(input);
-		FigureSlopes slopes = new FigureSlopes(input, point, numbers, network, state);
+		FigureSlopes slopes = new FigureSlopes(input, point, numbers, network, state, legs);
 		double[][] derivative = new double[figures.size()][knobs.size()];
 		List<Value> values = new ArrayList<>();
 		for (int p = 0; p < knobs.size(); p++) {
@@ -55,7 +60,7 @@ public final class SensitivityStudy {
 	}
 
 	/** The figures of a solved point: inductances of all pairs of whole windings, utilisations of legs with a saturation. */
-	static List<Figure> figures(StudyInput input, PointSolver.State state) {
+	static List<Figure> figures(StudyInput input, PointSolver.State state, int[] legs) {
 		List<Figure> figures = new ArrayList<>();
 		for (int i = 0; i < input.windings().size(); i++) {
 			for (int j = i; j < input.windings().size(); j++) {
@@ -65,10 +70,8 @@ public final class SensitivityStudy {
 				}
 			}
 		}
-		for (int k = 0; k < input.legs().size(); k++) {
-			if (!Double.isNaN(state.utilisation(k))) {
-				figures.add(new Figure(Kind.UTILISATION, input.legs().get(k).id(), input.legs().get(k).id(), state.utilisation(k)));
-			}
+		for (int k : legs) {
+			figures.add(new Figure(Kind.UTILISATION, input.legs().get(k).id(), input.legs().get(k).id(), state.utilisation(k)));
 		}
 		return figures;
 	}

@@ -7,6 +7,7 @@ import gapwright.physics.network.Network;
 import gapwright.study.StudyInput;
 import gapwright.study.sensitivity.FigureSlopes;
 import gapwright.study.vary.DesignNumbers;
+import gapwright.study.vary.JudgedLegs;
 import gapwright.study.vary.PointSolver;
 
 /** One operating point under changed numbers: its figures, and their slopes by every deviation. */
@@ -29,8 +30,7 @@ final class PointRun {
 		nominal = solver.get().solve(input.numbers(), point.network(), null);
 		wholeWindings = IntStream.range(0, input.windings().size())
 				.filter(w -> input.windings().get(w).whole()).toArray();
-		judgedLegs = nominal == null ? new int[0] : IntStream.range(0, input.legs().size())
-				.filter(k -> !Double.isNaN(nominal.utilisation(k))).toArray();
+		judgedLegs = nominal == null ? new int[0] : JudgedLegs.of(nominal);
 	}
 
 	/** @return whether there is a solution to vary */
@@ -115,7 +115,7 @@ final class PointRun {
 			return null;
 		}
 		Network network = numbers.network(point.network(), point.celsius());
-		FigureSlopes slopes = new FigureSlopes(input, point, numbers, network, state);
+		FigureSlopes slopes = new FigureSlopes(input, point, numbers, network, state, judgedLegs);
 		double[][] sum = new double[figureCount()][deviations.size()];
 		for (int t = 0; t < deviations.size(); t++) {
 			Deviation deviation = deviations.get(t);
