@@ -34,6 +34,8 @@ public abstract class MasterDetailPage extends Composite {
 	private Runnable onChoose = () -> { };
 	private EObject told;
 	private boolean pending;
+	/** A step has come while the page was hidden; laying out its fields at each would cost a fifth of a drag. */
+	private boolean outdated;
 
 	MasterDetailPage(Composite parent, DesignSession session, String title, String whenEmpty) {
 		super(parent, SWT.NONE);
@@ -59,6 +61,18 @@ public abstract class MasterDetailPage extends Composite {
 		scrolled.addListener(SWT.Resize, event -> FormLayouts.relayout(stack));
 		sash.setWeights(28, 72);
 		session.history().addListener(refresher);
+		addListener(SWT.Show, event -> {
+			if (outdated) {
+				refresh();
+			}
+		});
+		// shown again together with the whole editor, a page gets no other word of it than that it is to be painted
+		addListener(SWT.Paint, event -> {
+			if (outdated) {
+				outdated = false;
+				refreshLater();
+			}
+		});
 		addListener(SWT.Dispose, event -> session.history().removeListener(refresher));
 	}
 
@@ -159,6 +173,7 @@ public abstract class MasterDetailPage extends Composite {
 	}
 
 	final void refresh() {
+		outdated = false;
 		list.show(elements(session.design()));
 	}
 
@@ -169,7 +184,10 @@ public abstract class MasterDetailPage extends Composite {
 			getDisplay().asyncExec(() -> {
 				pending = false;
 				if (!isDisposed()) {
-					refresh();
+					outdated = !isVisible();
+					if (!outdated) {
+						refresh();
+					}
 				}
 			});
 		}
