@@ -10,6 +10,7 @@ import gapwright.model.edit.history.EditHistory;
 import gapwright.study.Lowering;
 import gapwright.study.OperatingPointResult;
 import gapwright.study.StudyResult;
+import gapwright.study.tolerance.ToleranceResult;
 
 /**
  * One design being worked on: its one history, its newest result, the chosen operating point and the shared
@@ -24,7 +25,9 @@ public final class DesignSession {
 	private final List<SessionListener> listeners = new CopyOnWriteArrayList<>();
 	private final StudyRunner runner;
 	private final Runnable historyListener = this::reckon;
+	private final List<Runnable> bandListeners = new CopyOnWriteArrayList<>();
 	private StudyResult result;
+	private ToleranceResult bands;
 	private String chosen;
 
 	/** @param ui runs on the UI thread, later or at once */
@@ -37,6 +40,7 @@ public final class DesignSession {
 
 	private void reckon() {
 		result = null;
+		bands = null;
 		runner.run(Lowering.of(design), design.getLegs().size() * design.getOperatingPoints().size());
 		if (runner.isBusy()) {
 			tell();
@@ -68,6 +72,34 @@ public final class DesignSession {
 	/** The result of the design as it stands; null while it is being reckoned. */
 	public StudyResult result() {
 		return result;
+	}
+
+	/** What tolerances do to the design as it stands, when that has been worked out; else null. */
+	public ToleranceResult bands() {
+		return bands;
+	}
+
+	/** The bands of the chosen operating point; null where there are none. */
+	public ToleranceResult.PointBands pointBands() {
+		OperatingPoint point = operatingPoint();
+		return bands == null || point == null ? null : bands.point(point.getId());
+	}
+
+	/** Keeps what tolerances do until the next edit. @param worked for the design as it stands */
+	public void keepBands(ToleranceResult worked) {
+		if (bands != worked) {
+			bands = worked;
+			bandListeners.forEach(Runnable::run);
+		}
+	}
+
+	/** @param listener told when bands have come; that they are gone is a change of the session */
+	public void addBandListener(Runnable listener) {
+		bandListeners.add(listener);
+	}
+
+	public void removeBandListener(Runnable listener) {
+		bandListeners.remove(listener);
 	}
 
 	/** The result at the chosen operating point; null where there is none. */
@@ -112,5 +144,6 @@ public final class DesignSession {
 		history.removeListener(historyListener);
 		history.dispose();
 		listeners.clear();
+		bandListeners.clear();
 	}
 }

@@ -34,6 +34,7 @@ abstract class DesignView extends ViewPart implements ITabbedPropertySheetPageCo
 
 	private final SessionListener sessionListener = this::refresh;
 	private final SelectionHub.Listener hubListener = this::selectedElsewhere;
+	private final Runnable bandListener = this::bandsCame;
 	private EditorFollower follower;
 	private DesignSession session;
 	private Composite stack;
@@ -49,6 +50,11 @@ abstract class DesignView extends ViewPart implements ITabbedPropertySheetPageCo
 
 	/** Shows the result of {@link DesignSession#pointResult()}, which is there. */
 	abstract void showResult(DesignSession shown);
+
+	/** Shows the bands of {@link DesignSession#pointBands()} beside the result, in views that have a place for them. */
+	void showBands(DesignSession shown) {
+		// most views have none
+	}
 
 	/** Drops everything shown. */
 	abstract void clear();
@@ -112,6 +118,7 @@ abstract class DesignView extends ViewPart implements ITabbedPropertySheetPageCo
 		session = next;
 		if (session != null) {
 			session.addListener(sessionListener);
+			session.addBandListener(bandListener);
 			session.selection().addListener(hubListener);
 		}
 		HistoryAction.install(getViewSite().getActionBars(), session == null ? null : session.history());
@@ -122,7 +129,14 @@ abstract class DesignView extends ViewPart implements ITabbedPropertySheetPageCo
 	private void unfollow() {
 		if (session != null) {
 			session.removeListener(sessionListener);
+			session.removeBandListener(bandListener);
 			session.selection().removeListener(hubListener);
+		}
+	}
+
+	private void bandsCame() {
+		if (!stack.isDisposed() && session.trouble().isEmpty()) {
+			showBands(session);
 		}
 	}
 

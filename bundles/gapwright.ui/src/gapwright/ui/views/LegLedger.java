@@ -35,7 +35,12 @@ public final class LegLedger extends DesignView {
 
 	@Override
 	void showResult(DesignSession shown) {
-		table.show(LegRow.of(shown.design(), shown.pointResult()));
+		table.show(LegRow.of(shown.design(), shown.pointResult(), shown.pointBands()));
+	}
+
+	@Override
+	void showBands(DesignSession shown) {
+		showResult(shown);
 	}
 
 	@Override

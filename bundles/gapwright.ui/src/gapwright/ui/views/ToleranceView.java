@@ -130,6 +130,10 @@ public final class ToleranceView extends ComputingView<ToleranceResult> {
 
 	@Override
 	void idle(DesignSession shown) {
+		if (shown.bands() != null) {
+			showFigures(shown, shown.bands());
+			return;
+		}
 		boolean any = !shown.design().getTolerances().isEmpty();
 		run.setEnabled(any);
 		say(any ? "The design has " + shown.design().getTolerances().size() + " tolerances: press Run."
@@ -167,6 +171,7 @@ public final class ToleranceView extends ComputingView<ToleranceResult> {
 	@Override
 	void showFigures(DesignSession shown, ToleranceResult figures) {
 		run.setText("Run");
+		shown.keepBands(figures);
 		ToleranceResult.PointBands point = figures.point(shown.operatingPoint().getId());
 		List<BandRow> rows = point == null ? List.of() : point.bands().stream().map(band -> BandRow.of(shown.design(), band)).toList();
 		List<BandRow> before = table.selection();

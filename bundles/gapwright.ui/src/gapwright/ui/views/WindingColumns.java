@@ -24,6 +24,10 @@ final class WindingColumns {
 						row -> row.result().apparentInductance(), value -> FigureFormat.si(value, "H")),
 				LedgerColumn.figures("Differential L", "H",
 						"Slope of the linkage over the winding's own current at the operating point; what the ripple sees", 100,
-						WindingRow::differentialInductance, value -> FigureFormat.si(value, "H")));
+						WindingRow::differentialInductance, value -> FigureFormat.si(value, "H")),
+				LedgerColumn.figures("Least L", "H", "Least differential inductance over all corners of the tolerances; run them in the Tolerances view", 80,
+						WindingRow::least, value -> FigureFormat.si(value, "H")),
+				LedgerColumn.figures("Greatest L", "H", "Greatest differential inductance over all corners of the tolerances", 85,
+						WindingRow::greatest, value -> FigureFormat.si(value, "H")));
 	}
 }

@@ -38,8 +38,13 @@ public final class WindingLedger extends DesignView {
 
 	@Override
 	void showResult(DesignSession shown) {
-		table.show(WindingRow.of(shown.design(), shown.pointResult()));
+		table.show(WindingRow.of(shown.design(), shown.pointResult(), shown.pointBands()));
 		matrix.show(table.rows(), shown.pointResult().inductance());
+	}
+
+	@Override
+	void showBands(DesignSession shown) {
+		showResult(shown);
 	}
 
 	@Override
