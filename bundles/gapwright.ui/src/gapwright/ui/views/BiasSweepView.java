@@ -164,7 +164,16 @@ public final class BiasSweepView extends ComputingView<SweepResult> {
 
 	@Override
 	boolean startsByItself() {
-		session = getAdapter(DesignSession.class);
+		DesignSession next = getAdapter(DesignSession.class);
+		if (next != session) {
+			// a range typed for one design means nothing for another
+			session = next;
+			wantedWinding = null;
+			wantedFrom = "";
+			wantedTo = "";
+			from.setText("");
+			to.setText("");
+		}
 		fill(session.design());
 		return true;
 	}

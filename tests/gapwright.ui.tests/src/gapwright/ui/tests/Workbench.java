@@ -162,6 +162,8 @@ final class Workbench {
 		case SWT.TAB -> "Tab";
 		case SWT.BS -> "BackSpace";
 		case SWT.F2 -> "F2";
+		case SWT.HOME -> "Home";
+		case SWT.END -> "End";
 		case SWT.ARROW_LEFT -> "Left";
 		case SWT.ARROW_RIGHT -> "Right";
 		case SWT.ARROW_UP -> "Up";
