@@ -172,6 +172,7 @@ final class Workbench {
 		case '.' -> "period";
 		case ',' -> "comma";
 		case '-' -> "minus";
+		case '+' -> "plus";
 		default -> {
 			if (!Character.isLetterOrDigit(code)) {
 				throw new IllegalArgumentException("no name for the key " + code);
