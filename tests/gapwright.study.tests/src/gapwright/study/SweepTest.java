@@ -133,4 +133,24 @@ class SweepTest {
 		};
 		assertThrows(CancellationException.class, () -> BiasSweep.run(input, new SweepRequest("full", "main", 0, 1, 2), stop));
 	}
+
+	/** Of 401 legs, those that matter most are found exactly, the others to the distance of two points. */
+	@Test
+	void ofALargeDesignTheFullestLegsAreFoundExactly() {
+		StringBuilder chain = new StringBuilder();
+		for (int i = 0; i < 399; i++) {
+			chain.append("<joints id=\"j").append(i).append("\" x=\"").append(i).append(" mm\" y=\"90 mm\"/>");
+		}
+		for (int i = 0; i < 400; i++) {
+			chain.append("<legs id=\"l").append(i).append("\" from=\"").append(i == 0 ? "b" : "j" + (i - 1)).append("\" to=\"")
+					.append(i == 399 ? "a" : "j" + i).append("\" material=\"ferrite\" width=\"").append(12 + 0.01 * i)
+					.append(" mm\" depth=\"15 mm\" pathLength=\"1 mm\"/>");
+		}
+		String back = "<legs id=\"back\" from=\"b\" to=\"a\" material=\"ferrite\" width=\"12 mm\" depth=\"15 mm\" pathLength=\"90 mm\"/>";
+		SweepResult coarse = sweep(0, 300, 6, back, chain.toString());
+		SweepResult fine = sweep(0, 300, 60, back, chain.toString());
+		assertEquals(fine.leg("l0").nearAt(), coarse.leg("l0").nearAt(), 1e-6);
+		assertEquals(fine.leg("l399").nearAt(), coarse.leg("l399").nearAt(), 50);
+		assertTrue(coarse.leg("l0").nearAt() < coarse.leg("l399").nearAt());
+	}
 }

@@ -2,8 +2,12 @@ package gapwright.study.sweep;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Set;
 import java.util.concurrent.CancellationException;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 
 import gapwright.physics.network.Excitation;
 import gapwright.physics.network.NetworkSolver;
@@ -12,6 +16,7 @@ import gapwright.study.OperatingPointResult;
 import gapwright.study.Progress;
 import gapwright.study.Study;
 import gapwright.study.StudyInput;
+import gapwright.study.vary.JudgedLegs;
 import gapwright.study.WindingResult;
 
 /** Varies the current of one winding at an operating point; each point starts from the one before. */
@@ -19,6 +24,8 @@ public final class BiasSweep {
 
 	/** Part of the current, and of the limit, to which it is found where a leg reaches a limit. */
 	private static final double FOUND_WITHIN = 1e-9;
+	/** Part of the work that the points of the sweep are; the rest finds where legs reach their limits. */
+	private static final double SWEPT = 0.8;
 
 	private final StudyInput input;
 	private final Progress progress;
@@ -28,6 +35,7 @@ public final class BiasSweep {
 	private final SweepRequest request;
 	private final StudyInput.PointData point;
 	private Solution warm;
+	private Set<Integer> exact = Set.of();
 
 	private BiasSweep(StudyInput input, SweepRequest request, Progress progress) {
 		this.input = input;
@@ -96,16 +104,30 @@ public final class BiasSweep {
 			for (int k = 0; k < density.length; k++) {
 				density[k][i] = s.legFluxDensity()[k];
 			}
-			progress.done((double) (i + 1) / count);
+			progress.done(SWEPT * (i + 1) / count);
 		}
+		exact = fullest(density);
 		List<SweepLeg> legs = new ArrayList<>();
 		for (int k = 0; k < density.length; k++) {
 			double saturation = input.legs().get(k).saturation().at(point.celsius());
 			double near = saturation * input.nearFraction();
 			legs.add(new SweepLeg(input.legs().get(k).id(), density[k], saturation, near, reaches(k, current, density[k], near),
 					reaches(k, current, density[k], saturation)));
+			progress.done(SWEPT + (1 - SWEPT) * (k + 1) / density.length);
 		}
 		return new SweepResult(point.id(), request.winding(), current, linkage, apparent, differential, legs);
+	}
+
+	/** Finding a current costs some solves for each leg: of a large design only the fullest legs are worth them. */
+	private Set<Integer> fullest(double[][] density) {
+		int[] legs = IntStream.range(0, density.length).toArray();
+		if (legs.length <= JudgedLegs.ALL_UP_TO) {
+			return IntStream.of(legs).boxed().collect(Collectors.toSet());
+		}
+		double[] use = new double[legs.length];
+		Arrays.setAll(use, k -> Arrays.stream(density[k]).map(Math::abs).max().orElse(0) / input.legs().get(k).saturation().at(point.celsius()));
+		return IntStream.of(legs).boxed().filter(k -> !Double.isNaN(use[k])).sorted(Comparator.comparingDouble(k -> -use[k]))
+				.limit(JudgedLegs.FULLEST).collect(Collectors.toSet());
 	}
 
 	private Solution solve(double amperes) {
@@ -158,6 +180,10 @@ public final class BiasSweep {
 
 	/** False position; the end that stays counts half each time (Illinois rule), so that neither stays for long. */
 	private double between(int leg, double below, double lacking, double above, double beyond, double limit) {
+		if (!exact.contains(leg)) {
+			// on a straight line between the two points
+			return below + (above - below) * lacking / (lacking - beyond);
+		}
 		double low = below;
 		double high = above;
 		double atLow = lacking;
