@@ -15,6 +15,8 @@ import gapwright.ui.editor.DesignEditor;
 final class Mouse {
 
 	private static final int STEPS = 6;
+	/** ms without any event. */
+	private static final long SETTLED = 500;
 
 	private final FigureCanvas control;
 	private final CanvasModel canvas;
@@ -24,6 +26,8 @@ final class Mouse {
 		control = (FigureCanvas) editor.getAdapter(GraphicalViewer.class).getControl();
 		canvas = editor.getAdapter(CanvasPage.class).canvas();
 		Workbench.focus(control);
+		// until views beside have found their size the drawing may be fitted anew, under the hand
+		Workbench.drain(SETTLED);
 	}
 
 	FigureCanvas control() {
