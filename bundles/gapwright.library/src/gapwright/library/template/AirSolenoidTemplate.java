@@ -54,8 +54,14 @@ final class AirSolenoidTemplate implements Template {
 	private double perTurnSquared(Entries entries) {
 		double diameter = entries.metres("diameter");
 		double length = entries.metres("length");
-		return layers ? Solenoid.wheelerMultilayer(1, diameter / 2, length, entries.metres("build"))
-				: Solenoid.currentSheet(1, diameter, length);
+		if (!layers) {
+			return Solenoid.currentSheet(1, diameter, length);
+		}
+		double build = entries.metres("build");
+		if (!(build < diameter)) {
+			throw new IllegalArgumentException("Build: must be below the mean diameter, or the winding has no inside");
+		}
+		return Solenoid.wheelerMultilayer(1, diameter / 2, length, build);
 	}
 
 	@Override
@@ -79,7 +85,7 @@ final class AirSolenoidTemplate implements Template {
 		double inside = length / (MU_0 * Math.PI / 4 * diameter * diameter);
 		double outside = 1 / perTurnSquared(entries) - inside;
 		if (!(outside > 0)) {
-			throw new IllegalArgumentException("Build: the formula makes no sense for a coil so thick");
+			throw new IllegalArgumentException("Length: so long that the formula leaves nothing of the field outside");
 		}
 		CoreSketch sketch = new CoreSketch(title()).material("nonmagnetic");
 		return StraightCoil.draw(sketch, diameter * 1e3, length * 1e3, length * 1e3, 1 / outside, entries);

@@ -86,7 +86,7 @@ public final class CoreSketch {
 		leg.setFrom(from);
 		leg.setTo(to);
 		leg.setMaterial(material);
-		leg.setWidth(millimetres(width));
+		leg.setWidth(exactMillimetres(width));
 		leg.setDepth(depth);
 		design.getLegs().add(leg);
 		return leg;
@@ -95,7 +95,7 @@ public final class CoreSketch {
 	/** @param width mm */
 	static EDrawing.Shape rectangle(double width, Quantity depth) {
 		return leg -> {
-			leg.setWidth(millimetres(width));
+			leg.setWidth(exactMillimetres(width));
 			leg.setDepth(depth);
 		};
 	}

@@ -81,7 +81,7 @@ final class Entries {
 	Quantity sum(String first, String second) {
 		Quantity a = notNegative(first);
 		Quantity b = notNegative(second);
-		return b.si() == 0 ? a : a.si() == 0 ? b : CoreSketch.millimetres((a.si() + b.si()) * 1e3);
+		return b.si() == 0 ? a : a.si() == 0 ? b : CoreSketch.exactMillimetres((a.si() + b.si()) * 1e3);
 	}
 
 	int turns(String key) {

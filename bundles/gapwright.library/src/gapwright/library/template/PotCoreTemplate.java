@@ -83,7 +83,7 @@ final class PotCoreTemplate implements Template {
 		PathPart post = PathPart.prism(height, Math.PI * (r.post() * r.post() - r.hole() * r.hole()));
 		PathPart disc = PathPart.fan(2 * Math.PI * wall, r.post(), r.inner(), plate).share(0.5);
 		PathPart ring = PathPart.prism(height, Math.PI * wall * (r.outer() * r.outer() - r.inner() * r.inner())).share(0.5);
-		PathPart inside = PathPart.postCorner(r.hole(), r.post(), plate).share(0.5);
+		PathPart inside = PathPart.postCorner(r.hole(), r.post(), plate, wall).share(0.5);
 		PathPart outside = PathPart.wallCorner(r.inner(), r.outer(), plate).share(0.5 * wall);
 		return new ESection(post, disc, disc, ring, inside, inside, outside, outside);
 	}

@@ -76,7 +76,7 @@ final class RoundLegTemplate implements Template {
 		EDrawing.Frame frame = new EDrawing.Frame(entries.millimetres("diameter"), entries.millimetres("outerWidth"), yoke, yoke,
 				entries.millimetres("windowWidth"), entries.millimetres("windowHeight"));
 		CoreSketch sketch = new CoreSketch("E core with a round centre leg").material("mnzn-power-ferrite");
-		EDrawing.Shape bar = CoreSketch.rectangle(yoke, CoreSketch.millimetres(narrow));
+		EDrawing.Shape bar = CoreSketch.rectangle(yoke, CoreSketch.exactMillimetres(narrow));
 		EDrawing drawing = new EDrawing(sketch, frame, section(entries), leg -> {
 			leg.setShape(SectionShape.ROUND);
 			leg.setDiameter(diameter);

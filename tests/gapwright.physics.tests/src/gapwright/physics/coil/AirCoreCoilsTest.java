@@ -26,6 +26,20 @@ class AirCoreCoilsTest {
 		assertEquals(Solenoid.nagaoka(0.0100001), Solenoid.nagaoka(0.0099999), 1e-6);
 	}
 
+	/** A band far wider than long: L = µ₀a(ln(8a/l) − 1/2), Rayleigh and Niven (1881), from memory. */
+	@Test
+	void aVeryShortCoilTendsToRayleighsBand() {
+		for (double ratio : new double[] { 1e4, 1e6, 1e8 }) {
+			double band = MU_0 * 0.5 * (Math.log(4 * ratio) - 0.5);
+			assertEquals(1, Solenoid.currentSheet(1, 1, 1 / ratio) / band, 1e-8);
+		}
+		// by elliptic integrals of forty digits of a general numerical library, on both sides of the change of formula
+		double[][] exact = { { 199, 0.019769190712951938 }, { 201, 0.019604153963275037 }, { 1000, 0.0049618467876171734 }, { 1000000, 9.3594597009811782e-6 } };
+		for (double[] row : exact) {
+			assertEquals(1, Solenoid.nagaoka(row[0]) / row[1], 2e-11);
+		}
+	}
+
 	/** Wheeler's formulas against the current sheet, within what they are published to be good for. */
 	@Test
 	void wheelersFormulasHoldWhereTheyAreSaidTo() {

@@ -35,6 +35,17 @@ class EffectiveParametersTest {
 		PathPart straight = PathPart.taperingPlate(0.02, 0.012, 0.012, 0.005);
 		assertEquals(PathPart.prism(0.02, 6e-5).c1(), straight.c1(), 1e-12 * straight.c1());
 		assertThrows(IllegalArgumentException.class, () -> PathPart.fan(7, 1, 2, 1));
+		assertThrows(IllegalArgumentException.class, () -> PathPart.taperingPlate(-1, 1, 2, 1));
+	}
+
+	/** Series of ln(1 + e)/e about a plate of constant width. */
+	@Test
+	void aPlateThatHardlyTapersKeepsItsDigits() {
+		for (double e : new double[] { 1e-5, 1e-7, 1e-8, 1e-10 }) {
+			double expected = 0.02 / (0.005 * 0.012) * (1 - e / 2 + e * e / 3);
+			// the width itself is known to a unit in its last place
+			assertEquals(1, PathPart.taperingPlate(0.02, 0.012, 0.012 * (1 + e), 0.005).c1() / expected, 1e-14);
+		}
 	}
 
 	/** Ring 25/15/10 mm; makers' tables print 60.2 mm and 48.9 mm² for it (from memory). */
